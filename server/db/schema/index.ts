@@ -1,0 +1,6 @@
+export * from './farms'
+export * from './people'
+export * from './fields'
+export * from './machines'
+export * from './weather'
+export * from './records'
