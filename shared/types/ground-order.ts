@@ -1,3 +1,4 @@
+import type { Ground, Pass } from '../agronomy/ground'
 import type { FieldId, Instant, LocalDay, MachineId } from './ids'
 
 /**
@@ -75,8 +76,7 @@ export interface Ribbon {
   nights: { from: Instant, to: Instant }[]
 }
 
-export type Ground = 'fit' | 'close' | 'wet' | 'cold' | 'frozen'
-export type Pass = 'dig' | 'rocks' | 'plant' | 'roll' | 'spray'
+export type { Ground, Pass }
 
 export interface GroundRow {
   id: FieldId
