@@ -1,0 +1,140 @@
+import type { HourlyWeather } from './hourly'
+import { airPressureKpa, dailySaturationVapourPressure, psychrometricConstant, saturationVapourPressure, vapourPressureSlope } from './humidity'
+import { clearSkyRadiation, extraterrestrialHour, hourAngle, netLongwaveDay, netLongwaveHour, netShortwave } from './radiation'
+import { LEAST_WIND_MS, windAt2m } from './wind'
+
+/**
+ * Reference evapotranspiration: water that short, well-watered grass would use.
+ *
+ * Source: FAO-56 chapters 3 and 4.
+ */
+
+/** mm of water that one MJ m⁻² evaporates (FAO-56 eq 20). */
+export const MM_PER_MJ = 0.408
+/**
+ * Cloudiness (Rs/Rso) of night hours before any daylight was seen: the middle of FAO-56's 0.4 to 0.6 for humid
+ * climates (p. 75).
+ */
+const NIGHT_CLEARNESS = 0.5
+const SECONDS_PER_HOUR = 3600
+
+export interface DailyWeather {
+  minC: number
+  maxC: number
+  /** actual vapour pressure, kPa */
+  vapourKpa: number
+  /** m/s at 2 m */
+  wind2mMs: number
+  /** solar radiation, MJ m⁻² d⁻¹ */
+  radiation: number
+  /** clear-sky radiation, MJ m⁻² d⁻¹ */
+  clearSky: number
+  elevationM: number
+}
+
+/**
+ * Penman–Monteith for a day. FAO-56 eq 6, with G = 0 (eq 42).
+ * @returns mm/d
+ * @throws {RangeError} when the minimum is above the maximum or anything is NaN
+ */
+export function penmanMonteithDay(day: DailyWeather): number {
+  if (!(day.minC <= day.maxC)) throw new RangeError(`The day's minimum (${day.minC} °C) is above its maximum (${day.maxC} °C)`)
+  const mean = (day.minC + day.maxC) / 2
+  const slope = vapourPressureSlope(mean)
+  const gamma = psychrometricConstant(airPressureKpa(day.elevationM))
+  const wind = Math.max(LEAST_WIND_MS, day.wind2mMs)
+  const net = netShortwave(day.radiation) - netLongwaveDay(day.minC, day.maxC, day.vapourKpa, day.radiation / day.clearSky)
+  const deficit = dailySaturationVapourPressure(day.minC, day.maxC) - day.vapourKpa
+  const result = (MM_PER_MJ * slope * net + gamma * 900 / (mean + 273) * wind * deficit) / (slope + gamma * (1 + 0.34 * wind))
+  if (Number.isNaN(result)) throw new RangeError('A value of the day is missing')
+  return result
+}
+
+/**
+ * Hargreaves–Samani, for days of which only the extremes are known; FAO-56 p. 64 prefers eq 6 with estimates.
+ * FAO-56 eq 52.
+ * @param extraterrestrial - MJ m⁻² d⁻¹
+ * @returns mm/d, labelled a fallback wherever it is shown
+ * @throws {RangeError} when the minimum is above the maximum or anything is NaN
+ */
+export function hargreavesSamani(minC: number, maxC: number, extraterrestrial: number): number {
+  if (!(minC <= maxC) || Number.isNaN(extraterrestrial)) throw new RangeError(`The day's minimum (${minC} °C) is above its maximum (${maxC} °C)`)
+  return Math.max(0, 0.0023 * ((minC + maxC) / 2 + 17.8) * Math.sqrt(maxC - minC) * MM_PER_MJ * extraterrestrial)
+}
+
+export interface HourOfWeather {
+  temperatureC: number
+  vapourKpa: number
+  wind2mMs: number
+  /** solar radiation, MJ m⁻² h⁻¹ */
+  radiation: number
+  /** Rs/Rso of the hour, or the last of the day for a night hour */
+  clearness: number
+  daytime: boolean
+}
+
+/** Net radiation of an hour of the reference grass, MJ m⁻² h⁻¹. FAO-56 eq 40. */
+export function netRadiationHour(hour: HourOfWeather): number {
+  return netShortwave(hour.radiation) - netLongwaveHour(hour.temperatureC, hour.vapourKpa, hour.clearness)
+}
+
+/**
+ * Penman–Monteith for an hour. FAO-56 eqs 53, 45 and 46.
+ * @param gamma - psychrometric constant, kPa/°C
+ * @returns mm/h; slightly negative on a clear night, as published
+ */
+export function penmanMonteithHour(hour: HourOfWeather, gamma: number): number {
+  const net = netRadiationHour(hour)
+  const ground = (hour.daytime ? 0.1 : 0.5) * net
+  const slope = vapourPressureSlope(hour.temperatureC)
+  const deficit = saturationVapourPressure(hour.temperatureC) - hour.vapourKpa
+  const wind = Math.max(LEAST_WIND_MS, hour.wind2mMs)
+  return (MM_PER_MJ * slope * (net - ground) + gamma * 37 / (hour.temperatureC + 273) * wind * deficit) / (slope + gamma * (1 + 0.34 * wind))
+}
+
+/**
+ * Reference evapotranspiration of each hour of a stretch of weather.
+ *
+ * @param weather - every value known
+ * @param place - degrees, east positive; metres
+ * @returns mm in each hour, `weather.hours` long; dew is left out, so never negative
+ * @throws {RangeError} naming the first hour with a missing value
+ */
+export function hourlyReferenceEt(weather: HourlyWeather, place: { latitudeDeg: number, longitudeDeg: number, elevationM: number }): Float64Array {
+  const result = new Float64Array(weather.hours)
+  const gamma = psychrometricConstant(airPressureKpa(place.elevationM))
+  let clearness = NIGHT_CLEARNESS
+  for (let i = 0; i < weather.hours; i++) {
+    const middle = new Date((weather.startsAt + (i + 0.5) * SECONDS_PER_HOUR) * 1000)
+    const dayOfYear = dayOfYearUtc(middle)
+    const clock = middle.getUTCHours() + 0.5
+    const angle = wrapped(hourAngle(clock, 0, -place.longitudeDeg, dayOfYear))
+    const extraterrestrial = extraterrestrialHour(place.latitudeDeg, dayOfYear, angle)
+    const radiation = weather.radiationWm2[i]! * SECONDS_PER_HOUR / 1e6
+    const clearSky = clearSkyRadiation(extraterrestrial, place.elevationM)
+    // A low sun makes the quotient noise, so the last good one of the day stands for dusk and night (p. 75).
+    const sunIsUp = extraterrestrial > 0.3
+    if (sunIsUp) clearness = Math.min(1, Math.max(0.25, radiation / clearSky))
+    const temperatureC = weather.temperatureC[i]!
+    const mm = penmanMonteithHour({
+      temperatureC,
+      vapourKpa: saturationVapourPressure(temperatureC) * weather.humidityPct[i]! / 100,
+      wind2mMs: windAt2m(weather.windMs[i]!, 10),
+      radiation,
+      clearness,
+      daytime: extraterrestrial > 0,
+    }, gamma)
+    if (Number.isNaN(mm)) throw new RangeError(`The weather of the hour from ${new Date((weather.startsAt + i * SECONDS_PER_HOUR) * 1000).toISOString()} has a gap`)
+    result[i] = Math.max(0, mm)
+  }
+  return result
+}
+
+function dayOfYearUtc(date: Date): number {
+  return Math.floor((date.getTime() - Date.UTC(date.getUTCFullYear(), 0, 1)) / 86_400_000) + 1
+}
+
+/** An hour angle brought into −π to π, since a clock in UTC runs past the place's midnight. */
+function wrapped(angle: number): number {
+  return angle - 2 * Math.PI * Math.round(angle / (2 * Math.PI))
+}
