@@ -1,0 +1,47 @@
+import fc from 'fast-check'
+import { describe, expect, it } from 'vitest'
+import { greatCircleKm, roadHours, roadKm } from '../../../../../shared/agronomy/machine/road'
+
+const coordinate = fc.record({ latitude: fc.double({ min: -90, max: 90, noNaN: true }), longitude: fc.double({ min: -180, max: 180, noNaN: true }) })
+
+describe('greatCircleKm', () => {
+  it('gives the published haversine example, Nashville to Los Angeles, for its radius of 6,372.8 km', () => {
+    // Rosetta Code, 'Haversine formula': 2887.2599506071 km with R = 6372.8; ours has the IUGG radius.
+    const km = greatCircleKm({ latitude: 36.12, longitude: -86.67 }, { latitude: 33.94, longitude: -118.4 })
+    expect(km * 6372.8 / 6371.0088).toBeCloseTo(2887.2599506071, 6)
+  })
+
+  it('makes a minute of latitude a nautical mile, 1.852 km by definition, within 0.1 %', () => {
+    const km = greatCircleKm({ latitude: 47, longitude: -97 }, { latitude: 47 + 1 / 60, longitude: -97 })
+    expect(Math.abs(km / 1.852 - 1)).toBeLessThan(0.0011)
+  })
+
+  it('is 0 at home, the same both ways, and never shorter by a detour', () => {
+    fc.assert(fc.property(coordinate, coordinate, coordinate, (a, b, c) => {
+      expect(greatCircleKm(a, a)).toBe(0)
+      expect(greatCircleKm(a, b)).toBeCloseTo(greatCircleKm(b, a), 6)
+      expect(greatCircleKm(a, c) + greatCircleKm(c, b)).toBeGreaterThanOrEqual(greatCircleKm(a, b) - 1e-6)
+    }))
+  })
+
+  it.each([{ latitude: 91, longitude: 0 }, { latitude: 0, longitude: Number.NaN }])('refuses $latitude, $longitude', (place) => {
+    expect(() => greatCircleKm(place, { latitude: 0, longitude: 0 })).toThrow(RangeError)
+  })
+})
+
+describe('roadKm', () => {
+  it('is 1.3 times the straight line', () => {
+    const [from, to] = [{ latitude: 46.9, longitude: -96.8 }, { latitude: 46.95, longitude: -96.7 }]
+    expect(roadKm(from, to)).toBeCloseTo(1.3 * greatCircleKm(from, to), 12)
+  })
+})
+
+describe('roadHours', () => {
+  it('takes an hour for 15 miles (1.609344 km each, by definition) at 15 mph', () => {
+    expect(roadHours(15 * 1.609344, 15)).toBeCloseTo(1, 12)
+  })
+
+  it.each([[-1, 15], [3, 0], [3, Number.NaN]])('refuses %d km at %d mph', (km, mph) => {
+    expect(() => roadHours(km, mph)).toThrow(RangeError)
+  })
+})
