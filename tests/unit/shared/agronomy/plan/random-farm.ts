@@ -18,7 +18,7 @@ const flags = fc.array(fc.integer({ min: 1, max: 30 }), { minLength: 1, maxLengt
 
 const field = fc.record({
   areaAc: fc.integer({ min: 5, max: 400 }),
-  needed: fc.constantFrom([1, 0, 1, 0, 0], [1, 1, 1, 0, 0], [1, 1, 1, 1, 0], [0, 0, 1, 0, 0]),
+  needed: fc.constantFrom<number[]>([1, 0, 1, 0, 0], [1, 1, 1, 0, 0], [1, 1, 1, 1, 0], [0, 0, 1, 0, 0]),
   progress: fc.array(fc.double({ min: 0, max: 1, noNaN: true }), { minLength: 5, maxLength: 5 }),
   ground: fc.nat(1),
   usdPerAc: fc.integer({ min: 100, max: 900 }),
