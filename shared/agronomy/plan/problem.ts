@@ -2,6 +2,7 @@ import { PASSES } from '../ground'
 
 /** Passes by number: index into PASSES, Dig 0 to Spray 4. */
 export const PASS_COUNT = PASSES.length
+export const DIG = PASSES.indexOf('dig')
 export const PLANT = PASSES.indexOf('plant')
 export const ROLL = PASSES.indexOf('roll')
 export const SPRAY = PASSES.indexOf('spray')
@@ -15,8 +16,8 @@ export interface PlanProblem {
   runs: number
   fields: readonly PlanField[]
   machines: readonly PlanMachine[]
-  /** when each pass may be worked: stretch list (ground · runs + run) · 5 + pass */
-  workable: StretchLists
+  /** when each pass may be worked, one element a ground: stretch list run · 5 + pass */
+  workable: readonly StretchLists[]
   /** hour at which the run's rain starts on each ground, ground · runs + run; Infinity: not within the horizon */
   rainAt: Float64Array
 }
@@ -30,6 +31,8 @@ export interface PlanField {
   needed: Uint8Array
   /** fields alike in place, soil and crop share a ground */
   ground: number
+  /** hour before which nothing is begun in it; 0: not held back */
+  heldUntil: number
   /** share of the highest yield kept by planting in each hour of the plan, 0 to 1; NaN: not known */
   shareByHour: Float64Array
   /** share kept by waiting until the field is fit again after each run's rain, 0 to 1; NaN: not known */

@@ -15,6 +15,7 @@ export interface ReasonFacts {
   planter: string | null
   planterHours: number
   cropName: string
+  /** mean at seed depth over the hours that the crop's minimum is held against, °C */
   seedZoneC: number
   minimumSoilC: number
   /** at or above the chance under which a field is unlikely before rain */
@@ -48,7 +49,7 @@ export interface Say {
 export function reason(facts: ReasonFacts, say: Say): string {
   if (facts.ground === 'frozen') return frozen(facts, say)
   if (facts.inField) return inField(facts.inField, say)
-  if (facts.ground === 'cold') return `Dry enough, too cold: ${say.temperature(facts.seedZoneC)} at seed depth, ${facts.cropName} wants ${say.temperature(facts.minimumSoilC)}`
+  if (facts.ground === 'cold') return cold(facts, say)
   if (facts.savedPerPlanterHourUsd === null) return `${fitSince(facts, say)}; no table says what waiting costs ${facts.cropName} at this date`
   if (!facts.likely) return unlikely(facts, say)
   return likely(facts, facts.savedPerPlanterHourUsd, say)
@@ -57,6 +58,12 @@ export function reason(facts: ReasonFacts, say: Say): string {
 function frozen({ fitAt, rainAt }: ReasonFacts, say: Say): string {
   if (fitAt !== null && (rainAt === null || fitAt < rainAt)) return `Frozen; fit ${say.time(fitAt)} once the frost is out`
   return 'Frozen; nothing to lose by waiting'
+}
+
+function cold({ seedZoneC, minimumSoilC, cropName }: ReasonFacts, say: Say): string {
+  if (seedZoneC >= minimumSoilC) return `Warm enough, but cold rain is coming and would chill ${cropName} seed`
+  const [seed, wanted] = [say.temperature(seedZoneC), say.temperature(minimumSoilC)]
+  return `Dry enough, too cold: ${seed === wanted ? 'just under ' : ''}${seed} at seed depth, ${cropName} wants ${wanted}`
 }
 
 function inField({ machine, areaLeftAc, doneAt }: NonNullable<ReasonFacts['inField']>, say: Say): string {

@@ -69,7 +69,7 @@ export function visitField(problem: PlanProblem, machine: number, field: number,
   const target = problem.fields[field]!
   if (!hasWorkLeft(target, pass)) return NaN
   const move = at < 0 ? firstMoveHours[field]! : moveHours[at * problem.fields.length + field]!
-  const visit: Visit = { machine, field, leader: passBefore(target, pass), arriveAt: afterWorking(working, freeAt, move), notBefore: 0, notAfter: Infinity }
+  const visit: Visit = { machine, field, leader: passBefore(target, pass), arriveAt: afterWorking(working, freeAt, move), notBefore: target.heldUntil, notAfter: Infinity }
   if (pass === ROLL) visit.notAfter = timeline.finishedAt[field * PASS_COUNT + PLANT]! + ROLL_CLOSES_HOURS
   if (pass === SPRAY) followPlanting(visit, timeline)
   if (visit.leader >= 0 && !hasWorkLeft(target, visit.leader)) visit.leader = -1
@@ -82,7 +82,7 @@ function followPlanting(visit: Visit, timeline: Timeline): void {
   visit.notAfter = planted + SPRAY_CLOSES_HOURS
   if (visit.leader === ROLL && planted < Infinity && timeline.finishedAt[visit.field * PASS_COUNT + ROLL] === Infinity) {
     visit.leader = PLANT
-    visit.notBefore = planted + ROLL_CLOSES_HOURS
+    visit.notBefore = Math.max(visit.notBefore, planted + ROLL_CLOSES_HOURS)
   }
 }
 

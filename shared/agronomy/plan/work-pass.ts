@@ -34,8 +34,8 @@ export function workPass(problem: PlanProblem, run: number, visit: Visit, timeli
   const { areaAc, doneAc, ground } = problem.fields[field]!
   const node = field * PASS_COUNT + pass
   openNode(timeline, node, machine)
-  const { bounds, starts } = problem.workable
-  const list = (ground * problem.runs + run) * PASS_COUNT + pass
+  const { bounds, starts } = problem.workable[ground]!
+  const list = run * PASS_COUNT + pass
   let stretch = starts[list]!
   const lastStretch = starts[list + 1]!
   let acres = doneAc[pass]!
@@ -66,13 +66,12 @@ function leadHour(problem: PlanProblem, { field, leader }: Visit, acres: number,
 
 /** Nothing ahead to wait for. @returns acres done at the end */
 function workAlone(timeline: Timeline, node: number, from: number, to: number, acres: number, areaAc: number, rate: number): number {
-  const done = from + (areaAc - acres) / rate
-  if (done <= to) {
-    addPiece(timeline, node, from, done, acres, areaAc)
-    return areaAc
-  }
-  const after = acres + rate * (to - from)
-  addPiece(timeline, node, from, to, acres, after)
+  const left = areaAc - acres
+  // An acre that is only missing by rounding must not wait for the next fit hour.
+  const finishes = left <= rate * (to - from) + ACRE_TOLERANCE
+  const until = finishes ? Math.min(to, from + left / rate) : to
+  const after = finishes ? areaAc : acres + rate * (to - from)
+  addPiece(timeline, node, from, until, acres, after)
   return after
 }
 

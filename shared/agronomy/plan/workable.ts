@@ -5,7 +5,7 @@ export const STOPPING_RAIN_MM = 0.254
 /** Hours on end that ground must be workable to count as fit again after rain. A design choice: a pause in the rain is not. */
 const AGAIN_HOURS = 6
 
-/** Collects stretch lists one after another. */
+/** Collects the stretch lists of one ground: for each run, its five passes. */
 export class StretchListBuilder {
   private readonly starts: number[] = [0]
   private readonly bounds: number[] = []

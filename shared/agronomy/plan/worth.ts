@@ -50,10 +50,10 @@ export function stakeUsd(problem: PlanProblem, run: number, field: number): numb
 }
 
 /** First hour in which the ground may be planted in a run; Infinity when never within the horizon. */
-export function firstPlantingHour({ workable, runs }: PlanProblem, run: number, ground: number): number {
-  const list = (ground * runs + run) * PASS_COUNT + PLANT
-  const first = workable.starts[list]!
-  return first < workable.starts[list + 1]! ? workable.bounds[first]! : Infinity
+export function firstPlantingHour({ workable }: PlanProblem, run: number, ground: number): number {
+  const { starts, bounds } = workable[ground]!
+  const first = starts[run * PASS_COUNT + PLANT]!
+  return first < starts[run * PASS_COUNT + PLANT + 1]! ? bounds[first]! : Infinity
 }
 
 /** True when the last acre is planted before the run's rain, or, in a dry run, within the horizon. */

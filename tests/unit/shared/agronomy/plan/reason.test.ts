@@ -39,6 +39,8 @@ describe('reason', () => {
     ['any other', {}, 'Fit now; saves $576 per planter hour'],
     ['a field that loses nothing', { savedPerPlanterHourUsd: 0.4 }, 'Fit now; nothing lost by going last'],
     ['cold ground', { ground: 'cold', seedZoneC: 7.2, likely: false }, 'Dry enough, too cold: 45°F at seed depth, corn wants 50°F'],
+    ['ground that is all but warm enough', { ground: 'cold', seedZoneC: 9.9, likely: false }, 'Dry enough, too cold: just under 50°F at seed depth, corn wants 50°F'],
+    ['cold rain ahead', { ground: 'cold', seedZoneC: 10.5, likely: false }, 'Warm enough, but cold rain is coming and would chill corn seed'],
     ['frozen ground', { ground: 'frozen', likely: false }, 'Frozen; nothing to lose by waiting'],
     ['frost that goes out in time', { ground: 'frozen', fitAt: 30 }, 'Frozen; fit Wed 11:00 once the frost is out'],
     ['wet ground', { ground: 'wet', likely: false }, 'Too wet to work before the rain'],

@@ -107,6 +107,17 @@ describe('simulate', () => {
     expect(endOf(timeline, 0, PLANT)).toBeCloseTo(1 + 146 / 26, 9)
   })
 
+  it('begins nothing in a field that is held back', () => {
+    const timeline = timelineOf({
+      hours: 96,
+      fields: [{ areaAc: 20, heldUntil: 33 }],
+      machines: [{ pass: DIG, rateAcPerHour: 20, at: 0 }, { pass: PLANT, rateAcPerHour: 20, at: 0 }],
+      runs: [[{ rainAt: Infinity, flags: always }]],
+    })
+    expect(startOf(timeline, 0, DIG)).toBe(33)
+    expect(startOf(timeline, 0, PLANT)).toBeGreaterThan(33)
+  })
+
   it('sends two machines of one pass to different fields', () => {
     const timeline = timelineOf({
       hours: 96,

@@ -5,7 +5,7 @@ import { workingStretches } from '../../../../../shared/agronomy/machine/working
 /** A farm in words that a test can write and an independent reader can check a timeline against. */
 export interface SmallFarm {
   hours: number
-  fields: { areaAc: number, doneAc?: number[], needed?: number[], ground?: number, usdPerAc?: number }[]
+  fields: { areaAc: number, doneAc?: number[], needed?: number[], ground?: number, heldUntil?: number, usdPerAc?: number }[]
   machines: { pass: number, rateAcPerHour: number, fromHour?: number, toHour?: number, downUntil?: number, at?: number }[]
   /** runs × grounds: when the rain starts, and the flags of each pass hour by hour */
   runs: { rainAt: number, flags: Uint8Array[] }[][]
@@ -25,15 +25,16 @@ export function fitIn(hours: number, ...stretches: [from: number, to: number][])
 
 export function planProblem(farm: SmallFarm): PlanProblem {
   const grounds = farm.runs[0]!.length
-  const builder = new StretchListBuilder()
   const rainAt = new Float64Array(grounds * farm.runs.length)
   const noRain = new Float64Array(farm.hours)
-  for (let ground = 0; ground < grounds; ground++) {
+  const workable = Array.from({ length: grounds }, (_, ground) => {
+    const builder = new StretchListBuilder()
     for (const [run, places] of farm.runs.entries()) {
       rainAt[ground * farm.runs.length + run] = places[ground]!.rainAt
       for (let pass = 0; pass < PASS_COUNT; pass++) builder.add(places[ground]!.flags[pass]!, noRain, places[ground]!.rainAt, 0, farm.hours)
     }
-  }
+    return builder.build()
+  })
   return {
     hours: farm.hours,
     runs: farm.runs.length,
@@ -43,12 +44,13 @@ export function planProblem(farm: SmallFarm): PlanProblem {
       doneAc: Float64Array.from(field.doneAc ?? [0, 0, 0, 0, 0]),
       needed: Uint8Array.from(field.needed ?? [1, 0, 1, 0, 0]),
       ground: field.ground ?? 0,
+      heldUntil: field.heldUntil ?? 0,
       shareByHour: Float64Array.from({ length: farm.hours }, (_, hour) => (farm.shareByHour ?? (() => 1))(hour)),
       shareAfter: new Float64Array(farm.runs.length).fill(farm.shareAfter ?? 0.9),
       usdPerAc: field.usdPerAc ?? 500,
     })),
     machines: farm.machines.map((_, index) => planMachine(farm, index)),
-    workable: builder.build(),
+    workable,
     rainAt,
   }
 }
