@@ -36,7 +36,8 @@ const PARTICLE_DENSITY = 2.65
  *
  * @param texture - sand and clay 0 to 100 % and together at most 100 %; clay at most 60 %, organic matter at most 8 %
  * @returns water contents in m³/m³, conductivity in mm/h
- * @throws {RangeError} when a share is NaN or outside the range of the method
+ * @throws {RangeError} when a share is NaN or outside the range of the method, or in the corners where its fit gives
+ *   no curve (sands almost without clay and organic matter; 40 % sand with 60 % clay and much organic matter)
  */
 export function soilProperties(texture: SoilTexture): SoilProperties {
   refuseOutside(texture)
@@ -47,6 +48,7 @@ export function soilProperties(texture: SoilTexture): SoilProperties {
   const fieldCapacity = waterAt33(sand, clay, organic)
   const drainable = waterFrom0To33(sand, clay, organic)
   const saturation = fieldCapacity + drainable - 0.097 * sand + 0.043 // eq. 5
+  if (!(wiltingPoint > 0 && fieldCapacity > wiltingPoint && saturation > fieldCapacity)) throw new RangeError(`the method gives no water curve for sand ${texture.sandPct} %, clay ${texture.clayPct} %, organic matter ${organic} %`)
   const poreIndex = (Math.log(fieldCapacity) - Math.log(wiltingPoint)) / (Math.log(1500) - Math.log(33)) // eqs. 15, 18
   return {
     wiltingPoint,
