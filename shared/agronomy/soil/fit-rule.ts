@@ -8,6 +8,12 @@ export const TILLAGE_FIT = 1
 export const CARRIES = 2
 export const SURFACE_DRY = 3
 
+const UNFROZEN_INDEX = SOIL_SETTINGS.unfrozenIndex.value
+const SNOW_FREE_MM = SOIL_SETTINGS.snowFreeMm.value
+const SURFACE_DRY_MM = SOIL_SETTINGS.surfaceDryMm.value
+const FROM_HOUR = SOIL_SETTINGS.fitFromHour.value
+const TO_HOUR = SOIL_SETTINGS.fitToHour.value
+
 /** Hourly states in a row, inside the working day, after which a condition counts as held: two hours' readings. */
 export const HELD = 2
 
@@ -18,7 +24,7 @@ export const HELD = 2
  * @param mean10C - daily mean at 4 in, °C
  */
 export function isFrozen(frostIndex: number, mean10C: number): boolean {
-  return frostIndex >= SOIL_SETTINGS.unfrozenIndex.value || mean10C <= 0
+  return frostIndex >= UNFROZEN_INDEX || mean10C <= 0
 }
 
 /**
@@ -35,16 +41,16 @@ export function isFrozen(frostIndex: number, mean10C: number): boolean {
  * @param state - after that hour; `held` is updated
  */
 export function holdConditions(soil: FieldSoil, localHour: number, state: FieldState): void {
-  const open = state.snowMm < SOIL_SETTINGS.snowFreeMm.value && state.pondMm === 0 && !isFrozen(state.frostIndex, state.mean10C)
+  const open = state.snowMm < SNOW_FREE_MM && state.pondMm === 0 && !isFrozen(state.frostIndex, state.mean10C)
   const water1 = state.water1Mm / LAYER_MM[0]
   const water2 = state.water2Mm / LAYER_MM[1]
   const seedZone = open && water1 <= soil.fitWater
   const carries = open && water1 <= soil.carryWater
-  const inside = localHour >= SOIL_SETTINGS.fitFromHour.value && localHour < SOIL_SETTINGS.fitToHour.value
+  const inside = localHour >= FROM_HOUR && localHour < TO_HOUR
   hold(state.held, SEED_ZONE_FIT, seedZone, inside)
   hold(state.held, TILLAGE_FIT, seedZone && water2 <= soil.belowFitWater, inside)
   hold(state.held, CARRIES, carries, inside)
-  hold(state.held, SURFACE_DRY, carries && state.surfaceDryMm >= SOIL_SETTINGS.surfaceDryMm.value, inside)
+  hold(state.held, SURFACE_DRY, carries && state.surfaceDryMm >= SURFACE_DRY_MM, inside)
 }
 
 function hold(held: Uint8Array, condition: number, met: boolean, inside: boolean): void {

@@ -1,5 +1,7 @@
 import { SOIL_SETTINGS } from './settings'
 
+const SNOW_AT_OR_BELOW_C = SOIL_SETTINGS.snowAtOrBelowC.value
+
 /**
  * Whether what falls in an hour is snow.
  *
@@ -9,7 +11,7 @@ import { SOIL_SETTINGS } from './settings'
  * @param temperatureC - air temperature of the hour, °C
  */
 export function fallsAsSnow(temperatureC: number): boolean {
-  return temperatureC <= SOIL_SETTINGS.snowAtOrBelowC.value
+  return temperatureC <= SNOW_AT_OR_BELOW_C
 }
 
 /**

@@ -4,8 +4,8 @@ import type { SoilProperties } from './properties'
  * Water that leaves the foot of a layer under gravity alone in some hours, dθ/dt = −K(θ)/z solved in closed form.
  *
  * Source: K from Saxton & Rawls (2006) eq. 17; the unit-gradient form after Black, Gardner & Thurtell (1969) and
- * Sisson, Ferguson & van Genuchten (1980). Where the outflow is tiny (second-order term under 1e-10 of it) the
- * series is used in its place.
+ * Sisson, Ferguson & van Genuchten (1980). Where little flows, the first five terms of the binomial series stand for
+ * the power: they leave out less than 1e-8 of the flow.
  *
  * @param properties - of the layer
  * @param depthMm - thickness of the layer, mm
@@ -18,8 +18,16 @@ export function drainedMm(properties: SoilProperties, depthMm: number, waterMm: 
   const slope = properties.conductivityExponent - 1
   if (waterMm <= 0) return 0
   const speed = slope * properties.saturatedConductivityMmH * hours / full * Math.exp(slope * Math.log(waterMm / full))
-  if (speed < 1e-5) return waterMm * speed / slope * (1 - 0.5 * speed * (1 + 1 / slope))
-  return -waterMm * Math.expm1(-Math.log1p(speed) / slope)
+  if (speed < SERIES_BELOW) return waterMm * lossBySeries(speed, 1 / slope)
+  return waterMm * (1 - Math.exp(-Math.log(1 + speed) / slope))
+}
+
+/** Where the series is as good as the power, and quicker. */
+const SERIES_BELOW = 0.02
+
+/** 1 − (1 + x)^−a to the fifth term. */
+function lossBySeries(x: number, a: number): number {
+  return a * x * (1 - (a + 1) / 2 * x * (1 - (a + 2) / 3 * x * (1 - (a + 3) / 4 * x * (1 - (a + 4) / 5 * x))))
 }
 
 /**

@@ -11,6 +11,8 @@ const SWING_5 = swingByHour(DEPTH_2_IN_M)
 const SWING_10 = swingByHour(DEPTH_4_IN_M)
 const FROZEN_INDEX = SOIL_SETTINGS.frozenIndex.value
 const SNOW_INSULATES_MM = SOIL_SETTINGS.snowInsulatesMm.value
+const DRY_SURFACE_SWING = SOIL_SETTINGS.drySurfaceSwing.value
+const RESIDUE_SWING_LOSS = SOIL_SETTINGS.residueSwingLoss.value
 /** Hours of a local day that must be known before its range counts as that of the whole day. */
 const WHOLE_DAY_HOURS = 20
 
@@ -91,8 +93,8 @@ export function advanceWarmth(airC: number, localHour: number, state: FieldState
 export function surfaceHalfRangeC(soil: FieldSoil, state: FieldState): number {
   if (state.snowMm > SNOW_INSULATES_MM || state.frostIndex > FROZEN_INDEX) return 0
   const depletion = LAYER_MM[0] * soil.properties.fieldCapacity - state.water1Mm
-  const surface = depletion > soil.readilyEvaporableMm ? SOIL_SETTINGS.drySurfaceSwing.value : 1
-  return state.day.halfRangeC * surface * (1 - SOIL_SETTINGS.residueSwingLoss.value * soil.residuePct / 100)
+  const surface = depletion > soil.readilyEvaporableMm ? DRY_SURFACE_SWING : 1
+  return state.day.halfRangeC * surface * (1 - RESIDUE_SWING_LOSS * soil.residuePct / 100)
 }
 
 /** Temperature at 2 in in the middle of a local hour, °C. @param halfRangeC - at the surface */
