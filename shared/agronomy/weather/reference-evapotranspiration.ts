@@ -1,6 +1,6 @@
 import type { HourlyWeather } from './hourly'
 import { airPressureKpa, dailySaturationVapourPressure, psychrometricConstant, saturationVapourPressure, vapourPressureSlope } from './humidity'
-import { clearSkyRadiation, extraterrestrialHour, hourAngle, netLongwaveDay, netLongwaveHour, netShortwave } from './radiation'
+import { clearSkyRadiation, extraterrestrialHour, hourAngle, netLongwaveDay, netLongwaveHour, netShortwave, sunsetHourAngle } from './radiation'
 import { LEAST_WIND_MS, windAt2m } from './wind'
 
 /**
@@ -16,6 +16,11 @@ export const MM_PER_MJ = 0.408
  * climates (p. 75).
  */
 const NIGHT_CLEARNESS = 0.5
+/** The least that Rs/Rso of an hour counts for, so that net longwave stays a loss (ASCE-EWRI 2005, as public code has it). */
+const LEAST_CLEARNESS = 0.3
+/** Hours before sunset, from and to, in which the cloudiness of the night is read (FAO-56 p. 75). */
+const DUSK_FROM_H = 3
+const DUSK_TO_H = 2
 const SECONDS_PER_HOUR = 3600
 
 export interface DailyWeather {
@@ -92,42 +97,67 @@ export function penmanMonteithHour(hour: HourOfWeather, gamma: number): number {
   return (MM_PER_MJ * slope * (net - ground) + gamma * 37 / (hour.temperatureC + 273) * wind * deficit) / (slope + gamma * (1 + 0.34 * wind))
 }
 
+/** Where weather was measured or is forecast for. */
+export interface Place {
+  /** degrees, north positive */
+  latitudeDeg: number
+  /** degrees, east positive */
+  longitudeDeg: number
+  elevationM: number
+}
+
 /**
  * Reference evapotranspiration of each hour of a stretch of weather.
+ *
+ * The cloudiness of a night hour is that of 2 to 3 hours before the last sunset (FAO-56 p. 75); until one has been
+ * seen, 0.5. Deviation: an hour that is not wholly between sunrise and sunset counts as night for this, since a low
+ * sun makes the quotient noise.
  *
  * @param weather - every value known
  * @param place - degrees, east positive; metres
  * @returns mm in each hour, `weather.hours` long; dew is left out, so never negative
  * @throws {RangeError} naming the first hour with a missing value
  */
-export function hourlyReferenceEt(weather: HourlyWeather, place: { latitudeDeg: number, longitudeDeg: number, elevationM: number }): Float64Array {
+export function hourlyReferenceEt(weather: HourlyWeather, place: Place): Float64Array {
   const result = new Float64Array(weather.hours)
   const gamma = psychrometricConstant(airPressureKpa(place.elevationM))
-  let clearness = NIGHT_CLEARNESS
+  let nightClearness = NIGHT_CLEARNESS
   for (let i = 0; i < weather.hours; i++) {
-    const middle = new Date((weather.startsAt + (i + 0.5) * SECONDS_PER_HOUR) * 1000)
-    const dayOfYear = dayOfYearUtc(middle)
-    const clock = middle.getUTCHours() + 0.5
-    const angle = wrapped(hourAngle(clock, 0, -place.longitudeDeg, dayOfYear))
-    const extraterrestrial = extraterrestrialHour(place.latitudeDeg, dayOfYear, angle)
+    const sun = sunOfHour(weather.startsAt + i * SECONDS_PER_HOUR, place)
     const radiation = weather.radiationWm2[i]! * SECONDS_PER_HOUR / 1e6
-    const clearSky = clearSkyRadiation(extraterrestrial, place.elevationM)
-    // A low sun makes the quotient noise, so the last good one of the day stands for dusk and night (p. 75).
-    const sunIsUp = extraterrestrial > 0.3
-    if (sunIsUp) clearness = Math.min(1, Math.max(0.25, radiation / clearSky))
+    const own = Math.min(1, Math.max(LEAST_CLEARNESS, radiation / clearSkyRadiation(sun.extraterrestrial, place.elevationM)))
+    if (sun.hoursToSunset > DUSK_TO_H && sun.hoursToSunset <= DUSK_FROM_H) nightClearness = own
     const temperatureC = weather.temperatureC[i]!
     const mm = penmanMonteithHour({
       temperatureC,
       vapourKpa: saturationVapourPressure(temperatureC) * weather.humidityPct[i]! / 100,
-      wind2mMs: windAt2m(weather.windMs[i]!, 10),
+      wind2mMs: windAt10mTo2m(weather.windMs[i]!),
       radiation,
-      clearness,
-      daytime: extraterrestrial > 0,
+      clearness: sun.wholeHour ? own : nightClearness,
+      daytime: sun.extraterrestrial > 0,
     }, gamma)
-    if (Number.isNaN(mm)) throw new RangeError(`The weather of the hour from ${new Date((weather.startsAt + i * SECONDS_PER_HOUR) * 1000).toISOString()} has a gap`)
+    if (!Number.isFinite(mm)) throw new RangeError(`The weather of the hour from ${new Date((weather.startsAt + i * SECONDS_PER_HOUR) * 1000).toISOString()} has a gap`)
     result[i] = Math.max(0, mm)
   }
   return result
+}
+
+/** Wind at 2 m from wind at 10 m, a gap left a gap for the caller to name. FAO-56 eq 47. */
+function windAt10mTo2m(windMs: number): number {
+  return Number.isNaN(windMs) ? Number.NaN : windAt2m(windMs, 10)
+}
+
+/** The sun in an hour that starts at a Unix second: the sun angle is taken in its middle. */
+function sunOfHour(startsAt: number, place: Place): { extraterrestrial: number, hoursToSunset: number, wholeHour: boolean } {
+  const middle = new Date((startsAt + SECONDS_PER_HOUR / 2) * 1000)
+  const dayOfYear = dayOfYearUtc(middle)
+  const angle = wrapped(hourAngle(middle.getUTCHours() + middle.getUTCMinutes() / 60, 0, -place.longitudeDeg, dayOfYear))
+  const sunset = sunsetHourAngle(place.latitudeDeg, dayOfYear)
+  return {
+    extraterrestrial: extraterrestrialHour(place.latitudeDeg, dayOfYear, angle),
+    hoursToSunset: (sunset - angle) * 12 / Math.PI,
+    wholeHour: Math.abs(angle) + Math.PI / 24 <= sunset,
+  }
 }
 
 function dayOfYearUtc(date: Date): number {

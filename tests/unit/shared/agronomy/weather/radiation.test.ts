@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest'
+import { saturationVapourPressure } from '../../../../../shared/agronomy/weather/humidity'
 import {
   clearSkyRadiation, daylightHours, declination, extraterrestrialDay, extraterrestrialHour, hourAngle, inverseSunDistance, netLongwaveDay,
   netLongwaveHour, netShortwave, radiationFromSunshine, radiationFromTemperatures, seasonalCorrection, sunsetHourAngle,
@@ -28,24 +29,24 @@ describe('FAO-56 radiation', () => {
     const longwave = netLongwaveDay(19.1, 25.1, 2.1, 14.456 / clearSky)
     expect(longwave).toBeCloseTo(3.509, 3)
     expect(netShortwave(14.456)).toBeCloseTo(11.131, 3)
-    expect(netShortwave(14.456) - longwave).toBeCloseTo(7.623, 2)
+    expect(netShortwave(14.456) - longwave).toBeCloseTo(7.623, 3)
   })
 
   it('example 15, p. 61: Lyon in July from temperatures, 40.6 and 22.3 MJ', () => {
     const extraterrestrial = extraterrestrialDay(45 + 43 / 60, 196)
     expect(extraterrestrial).toBeCloseTo(40.555, 3)
-    expect(radiationFromTemperatures(14.8, 26.6, extraterrestrial, 0.16, clearSkyRadiation(extraterrestrial, 200))).toBeCloseTo(22.290, 2)
+    expect(radiationFromTemperatures(14.8, 26.6, extraterrestrial, 0.16, clearSkyRadiation(extraterrestrial, 200))).toBeCloseTo(22.290, 3)
   })
 
   it('example 19, p. 75: an hour at N’Diaye', () => {
     const latitude = 16 + 13 / 60
     expect(seasonalCorrection(274)).toBeCloseTo(0.1889, 4)
     const angle = hourAngle(14.5, 15, 16.25, 274)
-    expect(angle).toBeCloseTo(0.6821, 3)
+    expect(angle).toBeCloseTo(0.6821, 4)
     const extraterrestrial = extraterrestrialHour(latitude, 274, angle)
-    expect(extraterrestrial).toBeCloseTo(3.543, 2)
-    expect(clearSkyRadiation(extraterrestrial, 8)).toBeCloseTo(2.658, 2)
-    expect(netLongwaveHour(38, 3.445, 2.450 / 2.658)).toBeCloseTo(0.137, 3)
+    expect(extraterrestrial).toBeCloseTo(3.5434, 3)
+    expect(clearSkyRadiation(extraterrestrial, 8)).toBeCloseTo(2.6581, 3)
+    expect(netLongwaveHour(38, 0.52 * saturationVapourPressure(38), 2.450 / 2.6581)).toBeCloseTo(0.1373, 4)
   })
 
   it('has no sun at night, and the hours of a day add up to the day', () => {
