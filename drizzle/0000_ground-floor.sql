@@ -46,6 +46,7 @@ CREATE UNIQUE INDEX `people_email_unique` ON `people` (`email`);--> statement-br
 CREATE TABLE `sessions` (
 	`id_hash` text PRIMARY KEY NOT NULL,
 	`person_id` text NOT NULL,
+	`address` text NOT NULL,
 	`created_at` integer NOT NULL,
 	`last_seen_at` integer NOT NULL,
 	`expires_at` integer NOT NULL,
@@ -247,5 +248,5 @@ CREATE TABLE `jobs` (
 	`locked_until` integer,
 	`last_success_at` integer,
 	`last_failure` text,
-	`failures` integer DEFAULT 0 NOT NULL
+	`retry_at` integer
 ) STRICT;

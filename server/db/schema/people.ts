@@ -17,6 +17,8 @@ export const people = sqliteTable('people', {
 export const sessions = sqliteTable('sessions', {
   idHash: text().primaryKey(),
   personId: text().$type<PersonId>().notNull().references(() => people.id),
+  /** where the sign-in came from */
+  address: text().notNull(),
   createdAt: integer({ mode: 'timestamp_ms' }).notNull(),
   lastSeenAt: integer({ mode: 'timestamp_ms' }).notNull(),
   expiresAt: integer({ mode: 'timestamp_ms' }).notNull(),

@@ -35,7 +35,7 @@ export const jobs = sqliteTable('jobs', {
   lockedUntil: integer({ mode: 'timestamp_ms' }),
   lastSuccessAt: integer({ mode: 'timestamp_ms' }),
   lastFailure: text(),
-  failures: integer().notNull().default(0),
+  retryAt: integer({ mode: 'timestamp_ms' }),
 })
 
 /** The demo's clock: one row, the latest demo time that was reached. Absent outside the demo. */
