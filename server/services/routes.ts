@@ -1,0 +1,13 @@
+import { handlers } from '#nitro-internal-virtual/server-handlers'
+
+/** Methods that some route of the API answers at a path. */
+export function routeMethods(path: string): string[] {
+  const matching = handlers.filter(handler => handler.method && handler.route && matches(handler.route, path))
+  return [...new Set(matching.map(handler => handler.method!.toUpperCase()))].sort()
+}
+
+function matches(route: string, path: string): boolean {
+  const wanted = route.split('/')
+  const parts = path.split('/')
+  return wanted.length === parts.length && wanted.every((part, index) => part.startsWith(':') || part === parts[index])
+}
