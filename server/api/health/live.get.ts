@@ -1,0 +1,5 @@
+/** The process answers. */
+export default defineEventHandler((event) => {
+  allowAnyone(event)
+  return { alive: true }
+})
