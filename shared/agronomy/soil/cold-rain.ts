@@ -5,7 +5,8 @@ import { SOIL_SETTINGS } from './settings'
  * which swallowing seed is in danger, and rain in those hours carries the cold to it.
  *
  * Source: 45 °F for soybean (Iowa State University extension; corn sources range from 39 to 50 °F); 48 h for corn,
- * 24 h for soybean (University of Nebraska extension). The rain that sets it off is a design choice.
+ * 24 h for soybean (University of Nebraska extension). The rain that sets it off is a design choice. Hours behind the
+ * end of the arrays are not known and hold nobody back.
  *
  * @param temperature5C - at 2 in, °C, by the hour
  * @param rainMm - mm in each hour

@@ -48,21 +48,21 @@ export interface FieldSoil {
   surfaceStorageMm: number
 }
 
-/**
- * Share of field capacity at which the top 100 mm are fit. Clays: four published estimates agree on 0.90 ± 0.04;
- * the step by class follows Devine et al. (2022), 0.85 to 0.95 from clay to sand. Sandy clay and sandy clay loam
- * are set like their neighbours. Sandy loam and coarser have no share: see fitLevel.
- */
+const CLAY = SOIL_SETTINGS.fitShareClay.value
+const CLAY_LOAM = SOIL_SETTINGS.fitShareClayLoam.value
+const LOAM = SOIL_SETTINGS.fitShareLoam.value
+
+/** Share of field capacity at which the top 100 mm are fit. Sandy loam and coarser have none: see fitLevel. */
 const FIT_SHARE: Partial<Record<TextureClass, number>> = {
-  'clay': 0.9,
-  'silty clay': 0.9,
-  'sandy clay': 0.9,
-  'clay loam': 0.92,
-  'silty clay loam': 0.92,
-  'sandy clay loam': 0.95,
-  'loam': 0.95,
-  'silt loam': 0.95,
-  'silt': 0.95,
+  'clay': CLAY,
+  'silty clay': CLAY,
+  'sandy clay': CLAY,
+  'clay loam': CLAY_LOAM,
+  'silty clay loam': CLAY_LOAM,
+  'sandy clay loam': LOAM,
+  'loam': LOAM,
+  'silt loam': LOAM,
+  'silt': LOAM,
 }
 
 const BOTTOM_MM_PER_DAY: Record<Drainage, number> = {

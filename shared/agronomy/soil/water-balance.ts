@@ -1,9 +1,8 @@
 import type { HourlyWeather } from '../weather/hourly'
-import type { FieldSoil } from './field-soil'
+import { LAYER_MM, type FieldSoil } from './field-soil'
 import type { FieldState } from './field-state'
 import type { FieldTrace } from './field-trace'
 import { CARRIES, HELD, holdConditions, isFrozen, SEED_ZONE_FIT, SURFACE_DRY, TILLAGE_FIT } from './fit-rule'
-import { LAYER_MM } from './field-soil'
 import { advanceWarmth, beginDay, rememberSeedZone, surfaceHalfRangeC, temperature2InC, temperature4InC } from './warmth-hour'
 import { advanceWater } from './water-hour'
 
