@@ -1,5 +1,5 @@
 import { eq } from 'drizzle-orm'
-import type { PlaceId } from '../../../shared/types/ids'
+import type { FarmId, PlaceId } from '../../../shared/types/ids'
 import type { DbOrTransaction } from '../client'
 import { farms, fields, places } from '../schema'
 
@@ -18,4 +18,11 @@ export function listZonesOfPlace(db: DbOrTransaction, placeId: PlaceId): string[
 
 export function updateElevation(db: DbOrTransaction, placeId: PlaceId, elevationM: number): void {
   db.update(places).set({ elevationM }).where(eq(places.id, placeId)).run()
+}
+
+/** The places that a farm's fields lie in. */
+export function listPlacesOfFarm(db: DbOrTransaction, farmId: FarmId): PlaceRow[] {
+  const { id, latitude, longitude, elevationM, createdAt } = places
+  return db.selectDistinct({ id, latitude, longitude, elevationM, createdAt }).from(places)
+    .innerJoin(fields, eq(fields.placeId, places.id)).where(eq(fields.farmId, farmId)).orderBy(places.id).all()
 }
