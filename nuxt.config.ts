@@ -2,6 +2,7 @@ import { migrationsModule } from './server/db/migrations-module'
 
 export default defineNuxtConfig({
   modules: ['@nuxt/eslint', '@nuxtjs/tailwindcss', '@pinia/nuxt', 'nuxt-auth-utils'],
+  components: [{ path: '~/components', pathPrefix: false }],
   devtools: { enabled: false },
   app: {
     head: {
@@ -15,12 +16,35 @@ export default defineNuxtConfig({
     },
   },
   css: ['~/assets/css/main.css'],
+  runtimeConfig: {
+    session: {
+      name: '__Host-sillion',
+      password: '',
+      maxAge: 90 * 24 * 3600,
+      cookie: { sameSite: 'lax', secure: true, httpOnly: true, path: '/' },
+    },
+  },
+  routeRules: {
+    '/**': {
+      headers: {
+        'x-content-type-options': 'nosniff',
+        'referrer-policy': 'same-origin',
+        'x-frame-options': 'DENY',
+        'cross-origin-opener-policy': 'same-origin',
+        'cross-origin-embedder-policy': 'require-corp',
+        'cross-origin-resource-policy': 'same-origin',
+        'permissions-policy': 'camera=(), microphone=(), geolocation=(), payment=(), usb=()',
+      },
+    },
+  },
+  features: { inlineStyles: false },
   compatibilityDate: '2025-05-06',
   nitro: {
     preset: 'node-server',
     compressPublicAssets: true,
     exportConditions: ['module-sync'],
     experimental: { tasks: true },
+    errorHandler: '~~/server/error.ts',
     scheduledTasks: { '* * * * *': ['weather:pull'] },
     // The built server must find its migrations wherever it is copied to, so they travel as a module.
     virtual: { '#migrations': migrationsModule },
@@ -28,6 +52,7 @@ export default defineNuxtConfig({
   },
   typescript: { strict: true },
   telemetry: false,
+  auth: { loadStrategy: 'none' },
   eslint: { config: { stylistic: true } },
   tailwindcss: { cssPath: false, viewer: false },
 })

@@ -1,0 +1,29 @@
+/** The time axis that everything hangs from: linear, hours to pixels. */
+export interface TimeAxis {
+  /** left end, an instant */
+  startsAt: string
+  hours: number
+  pxPerHour: number
+}
+
+export const DESK_PX_PER_HOUR = 6.8
+export const PHONE_PX_PER_HOUR = 5.4
+
+/** x of an instant, px from the left end; not cut to the axis. */
+export function xOf(axis: TimeAxis, instant: string): number {
+  return round((Date.parse(instant) - Date.parse(axis.startsAt)) / 3_600_000 * axis.pxPerHour)
+}
+
+/** x of an instant, cut to the axis. */
+export function xWithin(axis: TimeAxis, instant: string): number {
+  return Math.min(widthOf(axis), Math.max(0, xOf(axis, instant)))
+}
+
+export function widthOf(axis: TimeAxis): number {
+  return round(axis.hours * axis.pxPerHour)
+}
+
+/** Tenths of a pixel keep the page small and the server's drawing equal to the browser's. */
+export function round(value: number): number {
+  return Math.round(value * 10) / 10
+}
