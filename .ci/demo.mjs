@@ -21,6 +21,8 @@ const env = {
   PORT: port,
   NITRO_PORT: port,
   PUBLIC_ORIGIN: address,
+  NUXT_SESSION_NAME: 'sillion',
+  NUXT_SESSION_COOKIE_SECURE: 'false',
   NUXT_SESSION_PASSWORD: demoSecret(),
 }
 await step('Setting up the demo farms', async () => {

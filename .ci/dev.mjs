@@ -9,6 +9,8 @@ const env = {
   SILLION_DEMO: '1',
   DATA_DIR: process.env.DATA_DIR || join(root, '.data/dev'),
   PUBLIC_ORIGIN: `http://localhost:${port}`,
+  NUXT_SESSION_NAME: 'sillion',
+  NUXT_SESSION_COOKIE_SECURE: 'false',
   NUXT_SESSION_PASSWORD: 'only-for-development-never-for-people',
 }
 await installWhenNeeded()

@@ -1,7 +1,7 @@
 /**
  * The rains and snows of the one hidden season, invented. Times are when the front passes the demo farm.
  *
- * A cold northern spring: snow into April, a wet end of April, dry days from 3 May, heavy rain on 8 May.
+ * A cold northern spring: snow into April, a wet end of April, dry days from 4 May, heavy rain on 8 May.
  */
 export interface Front {
   id: number
@@ -22,7 +22,7 @@ export const FRONTS: Front[] = [
   front('2025-03-05T04:00Z', 11, 6, 4), front('2025-03-11T15:00Z', 6, 2, 3), front('2025-03-15T20:00Z', 13, 9, 5), front('2025-03-23T02:00Z', 9, 5, 5),
   front('2025-03-29T12:00Z', 10, 6, 4), front('2025-04-02T16:00Z', 12, 8, 5), front('2025-04-09T01:00Z', 14, 11, 9), front('2025-04-11T15:00Z', 8, 4, 6),
   front('2025-04-16T18:00Z', 6, 5, 3), front('2025-04-22T11:00Z', 9, 10.6, 3), front('2025-04-26T20:00Z', 13, 20, 4), front('2025-04-28T02:00Z', 5, 5.3, 2),
-  front('2025-05-01T14:00Z', 6, 7.8, 3), front('2025-05-02T19:00Z', 3, 1.2, 2), front('2025-05-08T17:30Z', 14, 20, 4, 0.05), front('2025-05-10T22:00Z', 3, 2.2, 1),
+  front('2025-05-01T14:00Z', 7, 11, 2), front('2025-05-03T15:00Z', 7, 11, 1), front('2025-05-08T17:30Z', 14, 20, 4, 0.05), front('2025-05-10T22:00Z', 3, 2.2, 1),
   front('2025-05-15T19:00Z', 10, 14, 4), front('2025-05-19T08:00Z', 5, 4, 2), front('2025-05-23T22:00Z', 7, 11, 3), front('2025-05-28T12:00Z', 6, 6, 2),
   front('2025-06-02T20:00Z', 5, 13, 3), front('2025-06-07T03:00Z', 8, 9, 3), front('2025-06-12T21:00Z', 4, 16, 4), front('2025-06-18T10:00Z', 7, 7, 2),
   front('2025-06-23T22:00Z', 4, 21, 3), front('2025-06-29T05:00Z', 6, 8, 2), front('2025-07-04T23:00Z', 3, 12, 2), front('2025-07-10T20:00Z', 4, 9, 3),

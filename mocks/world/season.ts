@@ -115,7 +115,7 @@ function temperatureAt(time: number, place: Place, cloud: number, since: { front
   const day = time / 24
   const yearDay = day - Date.UTC(2025, 0, 1) / 86_400_000
   const north = (place.latitude - REFERENCE.latitude) * 0.8
-  let celsius = 6.2 - north - 17.5 * Math.cos(2 * Math.PI * (yearDay - 22) / 365)
+  let celsius = 10.4 - north - 17.5 * Math.cos(2 * Math.PI * (yearDay - 22) / 365)
   celsius += 2.2 * wandering(time, 60, KEY.warm)
   celsius += 7.2 * (1 - 0.65 * cloud) * swing(time, place)
   for (const { front, hours } of since) {

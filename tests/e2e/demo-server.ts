@@ -35,6 +35,8 @@ export async function startDemoServer(settings: Record<string, string> = {}): Pr
     PORT: port,
     NITRO_PORT: port,
     PUBLIC_ORIGIN: address,
+    NUXT_SESSION_NAME: 'sillion',
+    NUXT_SESSION_COOKIE_SECURE: 'false',
     NUXT_SESSION_PASSWORD: 'only-for-the-end-to-end-tests-and-nobody',
     SILLION_WEATHER_TROUBLE: troubleFile,
     ...settings,
