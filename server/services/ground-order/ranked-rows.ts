@@ -70,7 +70,7 @@ function reasonFacts(context: RowContext, field: number, index: number, again: r
   const before = plan.list[index - 1]
   return {
     ground: words[0]!,
-    inField: inField(plan, field),
+    inField: inField(plan, field, context.middle),
     fitAt: firstFit(words),
     rainAt: medianHour,
     planter: plan.machines[plan.assignment.machineOf[field * PASS_COUNT + PLANT]!]?.name ?? null,
@@ -99,14 +99,14 @@ function isNextDoor({ fields }: OrderPlan, one: number, other: number): boolean 
 }
 
 /** The machine of the furthest pass that is part done, when it stands in the field. */
-function inField({ fields, machines, drawn, problem }: OrderPlan, field: number): ReasonFacts['inField'] {
+function inField({ fields, machines, drawn, problem }: OrderPlan, field: number, middle: number): ReasonFacts['inField'] {
   const { season } = fields[field]!.known
   for (let pass = PASSES.length - 1; pass >= 0; pass--) {
     const doneAc = problem.fields[field]!.doneAc[pass]!
     if (!season.needed[pass] || doneAc === 0 || doneAc >= season.field.areaAc) continue
     const machine = machines.find(row => row.pass === PASSES[pass] && row.atFieldId === season.field.id)
     const finishedAt = drawn.finishedAt[field * PASS_COUNT + pass]!
-    const rainAt = problem.rainAt[problem.fields[field]!.ground * problem.runs]!
+    const rainAt = problem.rainAt[problem.fields[field]!.ground * problem.runs + middle]!
     if (machine) return { machine: machine.name, areaLeftAc: season.field.areaAc - doneAc, doneAt: finishedAt <= rainAt && Number.isFinite(finishedAt) ? finishedAt : null }
   }
   return null
