@@ -62,7 +62,8 @@ async function readCapped(stream: ReadableStream<Uint8Array>, signal: AbortSigna
     if (done) return Buffer.concat(chunks).toString('utf8')
     bytes += value.length
     if (bytes > MOST_BYTES) {
-      await reader.cancel()
+      // Not waited for: a sender that doesn't stop must not hold us up.
+      reader.cancel().catch(() => undefined)
       return null
     }
     chunks.push(value)

@@ -18,14 +18,24 @@ export interface LocalHours {
  */
 export function localHours(startsAt: number, hours: number, zone: string): LocalHours {
   const result: LocalHours = { hourOfDay: new Uint8Array(hours), calendarDay: new Uint16Array(hours), localDay: [] }
+  const offsetMs = offsetOfHours(startsAt, zone)
   let localDay = '' as LocalDay
   for (let i = 0; i < hours; i++) {
-    const instant = new Date((startsAt + i * 3600) * 1000)
-    const shown = new Date(instant.getTime() + tzOffset(zone, instant) * 60_000)
+    const shown = new Date((startsAt + i * 3600) * 1000 + offsetMs(i))
     result.hourOfDay[i] = shown.getUTCHours()
     result.calendarDay[i] = calendarDay(shown.getUTCMonth() + 1, shown.getUTCDate())
     if (i === 0 || result.calendarDay[i] !== result.calendarDay[i - 1]) localDay = shown.toISOString().slice(0, 10) as LocalDay
     result.localDay.push(localDay)
   }
   return result
+}
+
+/** How far the farm's clock is ahead of UTC in each hour, ms. Asking the time zone is slow, so a day without a change is asked twice. */
+function offsetOfHours(startsAt: number, zone: string): (hour: number) => number {
+  const ask = (hour: number) => tzOffset(zone, new Date((startsAt + hour * 3600) * 1000)) * 60_000
+  let [from, first, last] = [-Infinity, 0, 0]
+  return (hour) => {
+    if (hour >= from + 24) [from, first, last] = [hour, ask(hour), ask(hour + 23)]
+    return first === last ? first : ask(hour)
+  }
 }
