@@ -1,58 +1,78 @@
 import { assignField, emptyAssignment, unassignField, type Assignment } from './assign-machines'
-import { plottingPosition, quantileByRank } from './chance'
-import { orderFigures, worthWhenLastUsd } from './order-figures'
+import { quantileByRank } from './chance'
 import { PASS_COUNT, PLANT, type PlanProblem } from './problem'
 import { clearField, visitField } from './simulate'
 import { createTimeline, type Timeline } from './timeline'
 import { planterHours, plantedWorthUsd, stakeUsd } from './worth'
 
-/**
- * Chance of being planted before rain under which a field counts as unlikely: under 1 in 5, which the weather service
- * calls a 'slight chance'. A setting.
- */
-export const UNLIKELY_BELOW = 0.2
-
 /** Where every machine is, in every run, once the fields ranked so far are done: machine · runs + run. */
 interface Crew { freeAt: Float64Array, at: Int32Array }
 
-/** What comes of taking a field next: planting has started in 8 of 10 runs, and is finished in half of them, by these hours. */
-interface Prospect { savedPerHourUsd: number, startsAt: number, finishesAt: number }
+/** What comes of taking a field next: for each pass, the hours by which it has started in 8 of 10 runs, and is finished in half of them. */
+interface Prospect { savedPerHourUsd: number, startsAt: Float64Array, finishesAt: Float64Array }
 const SURE_ENOUGH = 0.8
 
+/** Machines that must not be kept waiting: the planter only, or all that work before planting ends. */
+export type KeepBusy = 'planter' | 'every machine'
+
 /**
- * First version of the order: one field after another, greedy.
+ * One field after another, greedy.
  *
- * At each step every field left is simulated as the next one in all runs. Of those whose planting has started in 8 of
- * 10 runs before another could be finished in half of them (so that the planter isn't sent to stand at wet ground while
- * a whole field could be planted), the one that saves most per planter hour is taken: (worth when taken next − worth
- * when left to the last) ÷ the planter hours it needs. In the end, fields that are unlikely before rain go behind those that are likely.
- * Ties fall to the field that comes first in the problem. It is no search: a later version improves on it.
+ * At each step every field left is simulated as the next one in all runs. Fields at which a machine would still wait, in
+ * 2 of 10 runs or more, when it could have finished another whole field are passed over. Of the others the one that
+ * saves most per planter hour is taken: (worth when taken next − worth when left to the last) ÷ the planter hours it
+ * needs. Ties fall to the field that comes first in the problem.
  *
  * @returns fields in the order to do them
  */
-export function rankFields(problem: PlanProblem): number[] {
+export function greedyOrder(problem: PlanProblem, keepBusy: KeepBusy): number[] {
   const timeline = createTimeline(problem.fields.length)
   const all = problem.fields.map((_, field) => field)
-  const lastUsd = worthWhenLastUsd(problem, byStakePerHour(problem, all), timeline)
-  const crew: Crew = {
-    freeAt: new Float64Array(problem.machines.length * problem.runs),
-    at: new Int32Array(problem.machines.length * problem.runs).fill(-1),
-  }
+  const lastUsd = worthBehindAllUsd(problem, timeline)
+  const crew = newCrew(problem)
   const assignment = emptyAssignment(problem)
   const list: number[] = []
   while (list.length < all.length) {
     const left = all.filter(field => !list.includes(field))
     const prospects = left.map(field => prospectOf(problem, field, lastUsd[field]!, crew, assignment, timeline))
-    const next = left[bestProspect(prospects)]!
-    assignField(problem, next, assignment)
-    for (let run = 0; run < problem.runs; run++) workField(problem, next, run, assignment, crew, timeline, true)
+    const next = left[bestProspect(prospects, keepBusy === 'planter' ? PLANT : 0)]!
+    sendCrew(problem, next, assignment, crew, timeline)
     list.push(next)
   }
-  return likelyFirst(problem, list, timeline)
+  return list
 }
 
-/** A rough order to start from: what each planter hour has at stake. */
-function byStakePerHour(problem: PlanProblem, fields: readonly number[]): number[] {
+function newCrew(problem: PlanProblem): Crew {
+  return {
+    freeAt: new Float64Array(problem.machines.length * problem.runs),
+    at: new Int32Array(problem.machines.length * problem.runs).fill(-1),
+  }
+}
+
+/** Has the crew work a field, in every run, behind what it has done. */
+function sendCrew(problem: PlanProblem, field: number, assignment: Assignment, crew: Crew, timeline: Timeline): void {
+  assignField(problem, field, assignment)
+  for (let run = 0; run < problem.runs; run++) workField(problem, field, run, assignment, crew, timeline, true)
+}
+
+/** Worth of each field, mean over the runs, if it were begun when the crew is through with all of them: a yardstick for 'last'. */
+function worthBehindAllUsd(problem: PlanProblem, timeline: Timeline): Float64Array {
+  const crew = newCrew(problem)
+  const assignment = emptyAssignment(problem)
+  for (const field of byStakePerHour(problem)) sendCrew(problem, field, assignment, crew, timeline)
+  const worthUsd = new Float64Array(problem.fields.length)
+  for (let field = 0; field < problem.fields.length; field++) {
+    for (let run = 0; run < problem.runs; run++) {
+      workField(problem, field, run, assignment, crew, timeline, false)
+      worthUsd[field]! += plantedWorthUsd(problem, timeline, run, field) / problem.runs
+    }
+  }
+  return worthUsd
+}
+
+/** The fields by what each hour of the planter has at stake. */
+export function byStakePerHour(problem: PlanProblem): number[] {
+  const fields = problem.fields.map((_, field) => field)
   const rate = problem.machines.find(machine => machine.pass === PLANT)?.rateAcPerHour ?? 1
   const perHour = fields.map((field) => {
     let usd = 0
@@ -67,24 +87,29 @@ function prospectOf(problem: PlanProblem, field: number, lastUsd: number, crew: 
   const booked = assignment.bookedHours.slice()
   assignField(problem, field, assignment)
   const planter = assignment.machineOf[field * PASS_COUNT + PLANT]!
-  const node = field * PASS_COUNT + PLANT
-  const starts = new Float64Array(problem.runs)
-  const finishes = new Float64Array(problem.runs)
+  const starts = Array.from({ length: PLANT + 1 }, () => new Float64Array(problem.runs))
+  const finishes = Array.from({ length: PLANT + 1 }, () => new Float64Array(problem.runs))
   let worthUsd = 0
   for (let run = 0; run < problem.runs; run++) {
     workField(problem, field, run, assignment, crew, timeline, false)
     worthUsd += plantedWorthUsd(problem, timeline, run, field) / problem.runs
-    starts[run] = timeline.count[node]! > 0 ? timeline.from[timeline.first[node]!]! : Infinity
-    finishes[run] = timeline.finishedAt[node]!
+    for (let pass = 0; pass <= PLANT; pass++) {
+      const node = field * PASS_COUNT + pass
+      finishes[pass]![run] = timeline.finishedAt[node]!
+      starts[pass]![run] = timeline.finishedAt[node] === 0 ? NOTHING_TO_DO : timeline.count[node]! > 0 ? timeline.from[timeline.first[node]!]! : Infinity
+    }
   }
   unassignField(problem, field, assignment, booked)
-  const hours = planter < 0 ? NaN : planterHours(problem.fields[field]!, problem.machines[planter]!.rateAcPerHour)
+  const hours = planter < 0 ? Number.NaN : planterHours(problem.fields[field]!, problem.machines[planter]!.rateAcPerHour)
   return {
     savedPerHourUsd: known((worthUsd - lastUsd) / hours),
-    startsAt: quantileByRank(starts, SURE_ENOUGH),
-    finishesAt: quantileByRank(finishes, 0.5),
+    startsAt: Float64Array.from(starts, hoursOfRuns => quantileByRank(hoursOfRuns, SURE_ENOUGH)),
+    finishesAt: Float64Array.from(finishes, hoursOfRuns => quantileByRank(hoursOfRuns, 0.5)),
   }
 }
+
+/** Start of a pass that has nothing left: it keeps no machine waiting. */
+const NOTHING_TO_DO = -1
 
 /** Works the passes of one field through planting, behind what the crew has done. @param moves - whether the crew stays there */
 function workField(problem: PlanProblem, field: number, run: number, { machineOf }: Assignment, crew: Crew, timeline: Timeline, moves: boolean): void {
@@ -101,23 +126,18 @@ function workField(problem: PlanProblem, field: number, run: number, { machineOf
   }
 }
 
-/** The most saved per planter hour among those that could start before any could be finished. */
-function bestProspect(prospects: readonly Prospect[]): number {
-  const firstDone = Math.min(...prospects.map(prospect => prospect.finishesAt))
-  const noneStarts = !prospects.some(prospect => prospect.startsAt < firstDone)
+/** The most saved per planter hour among those that keep no machine waiting, from the first pass that counts on. */
+function bestProspect(prospects: readonly Prospect[], firstPass: number): number {
+  const firstDone = Float64Array.from({ length: PLANT + 1 }, (_, pass) =>
+    Math.min(...prospects.map(prospect => prospect.startsAt[pass] === NOTHING_TO_DO ? Infinity : prospect.finishesAt[pass]!)))
+  const keepsWaiting = ({ startsAt }: Prospect) => startsAt.some((hour, pass) => pass >= firstPass && hour >= firstDone[pass]!)
+  const noneStarts = prospects.every(keepsWaiting)
   let best = -1
   for (const [index, prospect] of prospects.entries()) {
-    if (!noneStarts && prospect.startsAt >= firstDone) continue
+    if (!noneStarts && keepsWaiting(prospect)) continue
     if (best < 0 || prospect.savedPerHourUsd > prospects[best]!.savedPerHourUsd) best = index
   }
   return best
-}
-
-/** Fields that are unlikely before rain go behind the others, which can only gain by it. */
-function likelyFirst(problem: PlanProblem, list: readonly number[], timeline: Timeline): number[] {
-  const { doneRuns } = orderFigures(problem, list, timeline)
-  const likely = (field: number) => plottingPosition(doneRuns[field]!, problem.runs) >= UNLIKELY_BELOW
-  return [...list.filter(likely), ...list.filter(field => !likely(field))]
 }
 
 /** What isn't known ranks last. */

@@ -21,6 +21,11 @@ export interface ReasonFacts {
   /** at or above the chance under which a field is unlikely before rain */
   likely: boolean
   savedPerPlanterHourUsd: number | null
+  /** mean at stake by waiting, $; null: not known */
+  atStakeUsd: number | null
+  /** acres planted by the time the rain starts in the middle run, what was planted before included */
+  plantedByRainAc: number
+  areaAc: number
   /** nothing is dug yet, though the digger would get to it before rain */
   wouldLieOpen: boolean
   /** ranked field that saves most per planter hour */
@@ -40,17 +45,23 @@ export interface Say {
   money: (usd: number) => string
 }
 
+/** At stake under this counts as nothing, $. */
+const LEAST_USD = 10
+/** Part of a field that must get planted before rain for it to be worth saying, 0 to 1. */
+const WORTH_SAYING_SHARE = 0.25
+
 /**
  * The reason of a ranked field.
  *
- * The first rule that applies speaks: frost; a machine that is in the field; cold; what is not known; then, below the
- * cut, why it can't be done before rain; above it, when it is fit and what it saves.
+ * The first rule that applies speaks: frost; a machine that is in the field; cold; what is not known; nothing at
+ * stake; then, below the cut, why it can't be done before rain; above it, when it is fit and what it saves.
  */
 export function reason(facts: ReasonFacts, say: Say): string {
   if (facts.ground === 'frozen') return frozen(facts, say)
   if (facts.inField) return inField(facts.inField, say)
   if (facts.ground === 'cold') return cold(facts, say)
   if (facts.savedPerPlanterHourUsd === null) return `${fitSince(facts, say)}; no table says what waiting costs ${facts.cropName} at this date`
+  if (facts.atStakeUsd !== null && facts.atStakeUsd < LEAST_USD) return nothingAtStake(facts, say)
   if (!facts.likely) return unlikely(facts, say)
   return likely(facts, facts.savedPerPlanterHourUsd, say)
 }
@@ -71,13 +82,25 @@ function inField({ machine, areaLeftAc, doneAt }: NonNullable<ReasonFacts['inFie
   return doneAt === null ? left : `${left}, done by ${say.time(doneAt)}`
 }
 
+/** No field that can be planted before rain, or a date at which a few days cost nothing. */
+function nothingAtStake(facts: ReasonFacts, say: Say): string {
+  const { ground, fitAt, rainAt, cropName } = facts
+  if (ground !== 'fit' && (fitAt === null || (rainAt !== null && fitAt >= rainAt))) return wetUntilRain(rainAt)
+  return `${fitSince(facts, say)}; waiting out the rain costs ${cropName} next to nothing yet`
+}
+
+function wetUntilRain(rainAt: number | null): string {
+  return rainAt === null ? 'Not fit within five days' : 'Too wet to work before the rain'
+}
+
 function unlikely(facts: ReasonFacts, say: Say): string {
-  const { fitAt, rainAt, ground, planter, planterHours } = facts
-  if (ground !== 'fit' && fitAt === null) return rainAt === null ? 'Not fit within five days' : 'Too wet to work before the rain'
+  const { fitAt, rainAt, ground, planter, planterHours, plantedByRainAc, areaAc } = facts
+  if (ground !== 'fit' && fitAt === null) return wetUntilRain(rainAt)
   const hour = ground === 'fit' ? 0 : fitAt!
-  if (rainAt !== null && hour >= rainAt) return 'Too wet to work before the rain'
-  if (rainAt !== null && hour + planterHours > rainAt) return `${fitSince(facts, say)}, too late to finish before rain`
+  if (rainAt !== null && hour >= rainAt) return wetUntilRain(rainAt)
   if (facts.wouldLieOpen) return 'Leave it undug: it would lie open in the rain'
+  if (rainAt !== null && plantedByRainAc >= WORTH_SAYING_SHARE * areaAc) return `${fitSince(facts, say)}; rain is likely to stop it at ${say.area(plantedByRainAc)}`
+  if (rainAt !== null && hour + planterHours > rainAt) return `${fitSince(facts, say)}, too late to finish before rain`
   return `${fitSince(facts, say)}; only if ${planter ?? 'the planter'} is ahead of plan`
 }
 

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { assignMachines } from '../../../../../shared/agronomy/plan/assign-machines'
-import { fieldsToLeaveUndug, holdBack } from '../../../../../shared/agronomy/plan/leave-undug'
+import { acresBy, fieldsToLeaveUndug, holdBack } from '../../../../../shared/agronomy/plan/leave-undug'
 import { simulate } from '../../../../../shared/agronomy/plan/simulate'
 import { createTimeline } from '../../../../../shared/agronomy/plan/timeline'
 import { fitIn, planProblem, type SmallFarm } from './small-farm'
@@ -16,10 +16,22 @@ const farm = (fields: SmallFarm['fields']): SmallFarm => ({
 })
 
 describe('fieldsToLeaveUndug', () => {
-  it('names unlikely fields that the digger would open before rain', () => {
-    const problem = planProblem(farm([{ areaAc: 80 }, { areaAc: 80 }, { areaAc: 400 }, { areaAc: 80 }]))
-    // Dug by 2.33, 3.67 and 10.33; the fourth isn't reached before rain.
-    expect(fieldsToLeaveUndug(problem, [0, 1, 2, 3], [1, 2, 3], 0)).toEqual([1, 2])
+  it('names unlikely fields that would be opened and not planted', () => {
+    const problem = planProblem(farm([{ areaAc: 80 }, { areaAc: 80 }, { areaAc: 400 }]))
+    // The planter is in the first field until 9.33; of the second it would plant some 7 ac before rain, of the third none.
+    expect(fieldsToLeaveUndug(problem, [0, 1, 2], [1, 2], 0)).toEqual([1, 2])
+  })
+
+  it('keeps a field that is mostly planted by the rain, though it can’t be finished', () => {
+    const problem = planProblem(farm([{ areaAc: 100, needed: [1, 0, 1, 0, 0] }]))
+    // Planted from 1.33 to 10: 87 of the 100 ac that are dug.
+    expect(fieldsToLeaveUndug(problem, [0], [0], 0)).toEqual([])
+  })
+
+  it('judges the fields behind a held one by the time that it leaves', () => {
+    // Held, the big second field frees the planter for the third, which is then planted whole.
+    const problem = planProblem(farm([{ areaAc: 30 }, { areaAc: 400, doneAc: [0, 0, 0, 0, 0], ground: 0 }, { areaAc: 40 }]))
+    expect(fieldsToLeaveUndug(problem, [0, 1, 2], [1, 2], 0)).toEqual([1])
   })
 
   it('leaves out what is begun already', () => {
@@ -42,5 +54,16 @@ describe('holdBack', () => {
     expect(list).toEqual([0, 2, 1])
     expect(timeline.from[timeline.first[1 * 5 + DIG]!]).toBeGreaterThanOrEqual(50)
     expect(timeline.finishedAt[2 * 5 + DIG]).toBeLessThan(10)
+  })
+})
+
+describe('acresBy', () => {
+  it('counts the part of a piece that is done by the hour', () => {
+    const problem = planProblem(farm([{ areaAc: 120 }]))
+    const timeline = createTimeline(1)
+    simulate(problem, [[0], [0]], 0, 4, timeline)
+    expect(acresBy(timeline, DIG, 0)).toBe(0)
+    expect(acresBy(timeline, DIG, 2)).toBeCloseTo(60, 9)
+    expect(acresBy(timeline, DIG, 90)).toBeCloseTo(120, 9)
   })
 })

@@ -1,8 +1,9 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { plottingPosition } from '../../../../../shared/agronomy/plan/chance'
+import { byStakePerHour } from '../../../../../shared/agronomy/plan/greedy-order'
 import { orderFigures } from '../../../../../shared/agronomy/plan/order-figures'
-import { rankFields, UNLIKELY_BELOW } from '../../../../../shared/agronomy/plan/rank-fields'
+import { driestFirst, nearestFirst, rankFields, totalWorthUsd, unlikelyLast, UNLIKELY_BELOW } from '../../../../../shared/agronomy/plan/rank-fields'
 import { randomFarm } from './random-farm'
 import { fitIn, planProblem, type SmallFarm } from './small-farm'
 
@@ -25,24 +26,6 @@ describe('rankFields', () => {
       { areaAc: 100, usdPerAc: 600, ...planted },
     ])))
     expect(ranked).toEqual([1, 2, 0])
-  })
-
-  it('plants what is fit while the richer ground is still wet', () => {
-    const wetUntil12 = { rainAt: 40, flags: fitIn(96, [12, 40]) }
-    const ranked = rankFields(planProblem(farm(
-      [{ areaAc: 150, usdPerAc: 900, ground: 1, ...planted }, { areaAc: 100, usdPerAc: 300, ...planted }],
-      { runs: [[{ rainAt: 40, flags: fitIn(96, [0, 40]) }, wetUntil12]] },
-    )))
-    expect(ranked).toEqual([1, 0])
-  })
-
-  it('waits an hour for the richer ground rather than start a long field just before', () => {
-    const wetUntil1 = { rainAt: 20, flags: fitIn(96, [1, 20]) }
-    const ranked = rankFields(planProblem(farm(
-      [{ areaAc: 150, usdPerAc: 900, ground: 1, ...planted }, { areaAc: 150, usdPerAc: 300, ...planted }],
-      { runs: [[{ rainAt: 20, flags: fitIn(96, [0, 20]) }, wetUntil1]] },
-    )))
-    expect(ranked).toEqual([0, 1])
   })
 
   it('puts fields whose figures aren’t known behind the others', () => {
@@ -76,5 +59,39 @@ describe('rankFields', () => {
       const likely = ranked.map(field => plottingPosition(doneRuns[field]!, problem.runs) >= UNLIKELY_BELOW)
       expect(likely).toEqual([...likely].sort((a, b) => Number(b) - Number(a)))
     }), { numRuns: 100 })
+  })
+
+  it('is never worth less than what a person would try, with the same fields put off', () => {
+    fc.assert(fc.property(randomFarm, (random) => {
+      const problem = planProblem({ ...random, shareByHour: hour => 1 - Math.floor(hour / 24) / 50, shareAfter: 0.5 })
+      const worth = (list: number[]) => totalWorthUsd(orderFigures(problem, list))
+      const ranked = worth(rankFields(problem))
+      for (const made of [byStakePerHour(problem), nearestFirst(problem), driestFirst(problem)]) {
+        expect(ranked).toBeGreaterThanOrEqual(worth(unlikelyLast(problem, made)) - 0.05)
+      }
+    }), { numRuns: 100 })
+  })
+})
+
+describe('nearestFirst', () => {
+  it('goes from field to field, always to the nearest', () => {
+    const problem = planProblem(farm([{ areaAc: 10, ...planted }, { areaAc: 10, ...planted }, { areaAc: 10, ...planted }]))
+    const planter = problem.machines[0]!
+    planter.firstMoveHours.set([3, 1, 2])
+    planter.moveHours.set([0, 5, 5, 4, 0, 9, 5, 5, 0])
+    expect(nearestFirst(problem)).toEqual([1, 0, 2])
+  })
+})
+
+describe('driestFirst', () => {
+  it('goes by the hour in which a field may first be planted', () => {
+    const grounds = [30, 2, Infinity].map(from => ({ rainAt: Infinity, flags: fitIn(96, [from, 96]) }))
+    expect(driestFirst(planProblem(farm([2, 0, 1].map(ground => ({ areaAc: 10, ground, ...planted })), { runs: [grounds] })))).toEqual([2, 1, 0])
+  })
+})
+
+describe('totalWorthUsd', () => {
+  it('adds up what is known', () => {
+    expect(totalWorthUsd({ worthUsd: Float64Array.of(100, Number.NaN, 20), doneRuns: new Int32Array(3) })).toBe(120)
   })
 })
