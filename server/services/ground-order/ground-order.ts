@@ -1,57 +1,78 @@
+import { TZDate } from '@date-fns/tz'
 import type { FarmId } from '../../../shared/types/ids'
-import type { GroundOrder } from '../../../shared/types/ground-order'
+import type { ForecastSummary, GroundOrder } from '../../../shared/types/ground-order'
 import type { Db } from '../../db/client'
 import { listCrops } from '../../db/queries/crops'
 import type { Farm } from '../../db/queries/farms'
 import { listFields } from '../../db/queries/fields'
-import { findForecastAge } from '../../db/queries/forecasts'
 import { listMachines } from '../../db/queries/machines'
 import { listPassTotals } from '../../db/queries/pass-records'
-import { listPlacesOfFarm, type PlaceRow } from '../../db/queries/places'
+import { listPlacesOfFarm } from '../../db/queries/places'
 import { listSoils } from '../../db/queries/soils'
+import { findNewestPull } from '../../db/queries/weather-pulls'
 import { forecastSummary } from '../weather/forecast-summary'
+import { freshness } from '../weather/freshness'
 import { weatherFor } from '../weather/weather-for'
-import { HORIZON_HOURS } from './farm-places'
+import type { FarmInputs } from './farm-inputs'
 import { PAST_HOURS } from './place-work'
 import { workOutOrder } from './work-out-order'
 
 const HOUR_MS = 3_600_000
-/** Farms whose last order is kept in memory. */
+/** Hours of forecast that are asked for: the order looks 120 h ahead, and whether ground is fit again is looked for behind that. */
+const AHEAD_HOURS = 7 * 24
+/** Farms of a database whose last order is kept in memory. */
 const MOST_KEPT = 50
-const kept = new Map<FarmId, { key: string, order: GroundOrder }>()
+
+interface Kept { key: string, order: GroundOrder }
+const keptOf = new WeakMap<Db, Map<FarmId, Kept>>()
 
 /**
  * A farm's Ground order as of now.
  *
- * Worked out again when the farm's data, a forecast or the hour has changed, and kept in between.
+ * Worked out again when the farm's data, the newest pull, the forecast's freshness or the hour has changed, and kept in
+ * between. Forecasts come with pulls only, so one look at the newest pull tells whether there are newer ones.
  */
 export function groundOrder(db: Db, farm: Farm, now: Date): GroundOrder {
-  const places = listPlacesOfFarm(db, farm.id)
-  const forecast = forecastSummary(db, places.map(place => place.id), farm.invented, now)
-  const key = JSON.stringify([farm.revision, Math.floor(now.getTime() / HOUR_MS), forecast.status, forecast.trouble, newestOf(db, places, now)])
+  const kept = keptFarms(db)
   const known = kept.get(farm.id)
-  if (known?.key === key) return { ...known.order, now: now.toISOString(), forecast }
-  const order = workOutOrder({
-    farm,
-    now,
-    fields: listFields(db, farm.id),
-    soils: listSoils(db, farm.id),
-    crops: listCrops(db, farm.id),
-    machines: listMachines(db, farm.id),
-    passTotals: listPassTotals(db, farm.id, seasonStart(now)),
-    weather: new Map(places.map(place => [place.id, weatherFor(db, place, now, { pastHours: PAST_HOURS, aheadHours: HORIZON_HOURS })])),
-    forecast,
-  })
+  const pull = findNewestPull(db)
+  const key = (forecast: ForecastSummary) => JSON.stringify([farm.revision, Math.floor(now.getTime() / HOUR_MS), forecast.fetchedAt, freshnessOf(forecast, now), pull?.id, pull?.outcome])
+  if (known && known.key === key(known.order.forecast)) return { ...known.order, now: now.toISOString() }
+  const order = workOutOrder(loadInputs(db, farm, now))
+  kept.delete(farm.id)
   if (kept.size >= MOST_KEPT) kept.delete(kept.keys().next().value!)
-  kept.set(farm.id, { key, order })
+  kept.set(farm.id, { key: key(order.forecast), order })
   return order
 }
 
-function newestOf(db: Db, places: PlaceRow[], now: Date): (string | null)[] {
-  return places.flatMap(place => (['forecast', 'runs'] as const).map(kind => findForecastAge(db, place.id, kind, now)?.id ?? null))
+function keptFarms(db: Db): Map<FarmId, Kept> {
+  const kept = keptOf.get(db) ?? new Map<FarmId, Kept>()
+  keptOf.set(db, kept)
+  return kept
 }
 
-/** Work of the season counts from the start of its year. */
-function seasonStart(now: Date): Date {
-  return new Date(Date.UTC(now.getUTCFullYear(), 0, 1))
+function freshnessOf({ fetchedAt, status }: ForecastSummary, now: Date): ForecastSummary['status'] {
+  return status === 'none' ? 'none' : freshness(fetchedAt === null ? null : new Date(fetchedAt), now)
+}
+
+function loadInputs(db: Db, farm: Farm, now: Date): FarmInputs {
+  const places = listPlacesOfFarm(db, farm.id)
+  const fields = listFields(db, farm.id)
+  return {
+    farm,
+    now,
+    fields,
+    soils: listSoils(db, farm.id),
+    crops: listCrops(db, farm.id),
+    machines: listMachines(db, farm.id),
+    passTotals: listPassTotals(db, farm.id, seasonStart(now, farm.zone)),
+    weather: new Map(places.map(place => [place.id, weatherFor(db, place, now, { pastHours: PAST_HOURS, aheadHours: AHEAD_HOURS })])),
+    forecast: forecastSummary(db, places.map(place => place.id), farm.invented, now),
+  }
+}
+
+/** Work of the season counts from the first of January at the farm. */
+export function seasonStart(now: Date, zone: string): Date {
+  const year = new TZDate(now.getTime(), zone).getFullYear()
+  return new Date(new TZDate(year, 0, 1, zone).getTime())
 }

@@ -1,6 +1,7 @@
 import { PASSES } from '../../../shared/agronomy/ground'
 import { greatCircleKm } from '../../../shared/agronomy/machine/road'
 import { plottingPosition, quantileByRank } from '../../../shared/agronomy/plan/chance'
+import { acresBy } from '../../../shared/agronomy/plan/leave-undug'
 import { PASS_COUNT, PLANT } from '../../../shared/agronomy/plan/problem'
 import { reason, type ReasonFacts, type Say } from '../../../shared/agronomy/plan/reason'
 import type { Ground as GroundWord } from '../../../shared/agronomy/ground'
@@ -80,6 +81,9 @@ function reasonFacts(context: RowContext, field: number, index: number, again: r
     minimumSoilC: known.needs.minimumSoilC,
     likely: !plan.unlikely.has(field),
     savedPerPlanterHourUsd: savedPerHour(plan, field),
+    atStakeUsd: spread(plan.stakes[field]!)?.meanUsd ?? null,
+    plantedByRainAc: plan.problem.fields[field]!.doneAc[PLANT]! + acresBy(plan.drawn, field * PASS_COUNT + PLANT, medianHour ?? Infinity),
+    areaAc: known.season.field.areaAc,
     wouldLieOpen: plan.held.has(field),
     savesMost: plan.list.every(other => (savedPerHour(plan, other) ?? -Infinity) <= (savedPerHour(plan, field) ?? -Infinity)),
     staysWetLongest: tells && likely.every(other => again[other]! <= again[field]!),
