@@ -1,6 +1,7 @@
 import { abandonPulls } from '../db/queries/weather-pulls'
 import { useApp } from '../services/app'
-import { runDueJobs } from '../services/jobs'
+import { demoWorkJob } from '../services/demo-work'
+import { registerJob, runDueJobs } from '../services/jobs'
 import { log } from '../services/log'
 import { registerWeatherPull } from '../services/weather/pull-job'
 
@@ -9,5 +10,6 @@ export default defineNitroPlugin(() => {
   const app = useApp()
   abandonPulls(app.db, app.clock.now())
   registerWeatherPull()
+  if (app.demoClock) registerJob(demoWorkJob)
   runDueJobs(app).catch(error => log('error', 'Catching up failed.', { reason: String(error) }))
 })
