@@ -1,3 +1,4 @@
+import { fileURLToPath } from 'node:url'
 import { migrationsModule } from './server/db/migrations-module'
 
 export default defineNuxtConfig({
@@ -44,7 +45,6 @@ export default defineNuxtConfig({
     compressPublicAssets: true,
     exportConditions: ['module-sync'],
     experimental: { tasks: true },
-    errorHandler: '~~/server/error.ts',
     scheduledTasks: { '* * * * *': ['weather:pull'] },
     // The built server must find its migrations wherever it is copied to, so they travel as a module.
     virtual: { '#migrations': migrationsModule },
@@ -52,6 +52,12 @@ export default defineNuxtConfig({
   },
   typescript: { strict: true },
   telemetry: false,
+  hooks: {
+    // Ours answers the API and leaves pages to Nuxt's own.
+    'nitro:config': (config) => {
+      config.errorHandler = [fileURLToPath(new URL('server/error.ts', import.meta.url)), config.errorHandler ?? []].flat()
+    },
+  },
   auth: { loadStrategy: 'none' },
   eslint: { config: { stylistic: true } },
   tailwindcss: { cssPath: false, viewer: false },

@@ -1,4 +1,4 @@
-import { momentAt, rainBetween, TRUTH, type Place, type Scenario } from './season'
+import { momentAt, rainBetween, TRUTH, type Moment, type Place } from './season'
 
 /** What the invented service would answer: hour labels as the real one has them. */
 
@@ -16,17 +16,20 @@ export function availableAt(cycle: number): number {
   return cycle + AVAILABLE_AFTER_HOURS
 }
 
+/** A value at its label, from the moment of the label, the middle of the hour before it, and that hour's rain. */
 const VARIABLES = {
-  temperature_2m: (label, place, scenario) => momentAt(label, place, scenario).temperatureC,
-  relative_humidity_2m: (label, place, scenario) => momentAt(label, place, scenario).humidityPct,
-  dew_point_2m: (label, place, scenario) => momentAt(label, place, scenario).dewPointC,
-  cloud_cover: (label, place, scenario) => momentAt(label, place, scenario).cloudPct,
-  wind_speed_10m: (label, place, scenario) => momentAt(label, place, scenario).windMs,
-  wind_direction_10m: (label, place, scenario) => momentAt(label, place, scenario).windFromDeg,
-  wind_gusts_10m: (label, place, scenario) => momentAt(label - 0.5, place, scenario).gustMs,
-  precipitation: (label, place, scenario) => rainBetween(label - 1, label, place, scenario),
-  shortwave_radiation: (label, place, scenario) => momentAt(label - 0.5, place, scenario).radiationWm2,
-} satisfies Record<string, (label: number, place: Place, scenario: Scenario) => number>
+  temperature_2m: ({ at }) => at.temperatureC,
+  relative_humidity_2m: ({ at }) => at.humidityPct,
+  dew_point_2m: ({ at }) => at.dewPointC,
+  cloud_cover: ({ at }) => at.cloudPct,
+  wind_speed_10m: ({ at }) => at.windMs,
+  wind_direction_10m: ({ at }) => at.windFromDeg,
+  wind_gusts_10m: ({ before }) => before.gustMs,
+  precipitation: ({ rainMm }) => rainMm,
+  shortwave_radiation: ({ before }) => before.radiationWm2,
+} satisfies Record<string, (hour: Hour) => number>
+
+interface Hour { at: Moment, before: Moment, rainMm: number }
 
 export type Variable = keyof typeof VARIABLES
 
@@ -35,8 +38,8 @@ export function isVariable(name: string): name is Variable {
 }
 
 const DECIMALS: Partial<Record<Variable, number>> = { precipitation: 2, relative_humidity_2m: 0, wind_direction_10m: 0, shortwave_radiation: 0, cloud_cover: 0 }
-const remembered = new Map<string, number[]>()
-const MOST_REMEMBERED = 4000
+const remembered = new Map<string, Hour[]>()
+const MOST_REMEMBERED = 2000
 
 /**
  * One column of an answer: analysis for labels that are over, the cycle's forecast for those to come.
@@ -45,18 +48,22 @@ const MOST_REMEMBERED = 4000
  * @param run - 0 the control, −1 the single best forecast
  */
 export function column(variable: Variable, place: Place, from: number, hours: number, nowHours: number, run: number): number[] {
+  const digits = 10 ** (DECIMALS[variable] ?? 1)
+  return hoursOf(place, from, hours, nowHours, run).map(hour => Math.round(VARIABLES[variable](hour) * digits) / digits)
+}
+
+function hoursOf(place: Place, from: number, hours: number, nowHours: number, run: number): Hour[] {
   const cycle = newestCycle(nowHours)
   const over = Math.floor(nowHours)
-  const key = [variable, place.latitude, place.longitude, from, hours, over, cycle, run].join()
+  const key = [place.latitude, place.longitude, from, hours, over, cycle, run].join()
   const known = remembered.get(key)
   if (known) return known
-  const values: number[] = []
-  const digits = 10 ** (DECIMALS[variable] ?? 1)
-  for (let label = from; label < from + hours; label++) {
+  const made = Array.from({ length: hours }, (_, i) => {
+    const label = from + i
     const scenario = label <= over ? TRUTH : { madeAt: cycle, run }
-    values.push(Math.round(VARIABLES[variable](label, place, scenario) * digits) / digits)
-  }
+    return { at: momentAt(label, place, scenario), before: momentAt(label - 0.5, place, scenario), rainMm: rainBetween(label - 1, label, place, scenario) }
+  })
   if (remembered.size >= MOST_REMEMBERED) remembered.clear()
-  remembered.set(key, values)
-  return values
+  remembered.set(key, made)
+  return made
 }

@@ -33,7 +33,8 @@ function withholdUnasked(event: H3Event, response: { body?: unknown }): void {
 }
 
 async function compress(event: H3Event, response: { body?: unknown }): Promise<void> {
-  if (event.method === 'HEAD' || getResponseHeader(event, 'content-encoding') || response.body === null || response.body === undefined) return
+  // Nuxt draws its error page by asking itself, and wants that answer plain.
+  if (event.method === 'HEAD' || event.path.startsWith('/__nuxt_error') || getResponseHeader(event, 'content-encoding') || response.body === null || response.body === undefined) return
   const isText = typeof response.body === 'string'
   const isObject = typeof response.body === 'object' && [Object.prototype, Array.prototype].includes(Object.getPrototypeOf(response.body) as object)
   if (!isText && !isObject) return

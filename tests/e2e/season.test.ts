@@ -79,7 +79,7 @@ describe('the demo season, through the API', () => {
     const firstFit = new Map<string, number>()
     let rained = false
     let sawWet: Ground[] = []
-    for (let moved = 0; moved < 24 * 9; moved += 6) {
+    for (let moved = 0; moved < 24 * 7; moved += 6) {
       await owner.moveClock(6)
       const order = await owner.order()
       const rainSoFar = hoursBetween(morning.rainLine.medianAt!, order.now)

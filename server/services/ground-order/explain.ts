@@ -26,11 +26,11 @@ export function explainGround({ season, soilRow, crop, place }: KnownField, { so
   const { weather } = place
   return {
     rows: [
-      { label: 'Water, seed zone', quantity: quantity('m3/m3', now.seedZoneWater), note: '0–4 in, end of the last hour' },
+      { label: 'Water, seed zone', quantity: quantity('m3/m3', now.seedZoneWater), note: 'top 100 mm (4 in), end of the last hour' },
       { label: 'Fit at or under', quantity: quantity('m3/m3', soil.fitWater) },
-      { label: 'Water, below', quantity: quantity('m3/m3', now.belowWater), note: '4–12 in' },
+      { label: 'Water, below', quantity: quantity('m3/m3', now.belowWater), note: '100 to 300 mm (4 to 12 in)' },
       { label: 'Tillable at or under', quantity: quantity('m3/m3', soil.belowFitWater) },
-      { label: 'Soil at seed depth', quantity: quantity('c', now.seedMeanC), note: `mean of ${SOIL_SETTINGS.seedMeanHours.value} hours at 2 in` },
+      { label: 'Soil at seed depth', quantity: quantity('c', now.seedMeanC), note: `mean of ${SOIL_SETTINGS.seedMeanHours.value} hours at 50 mm (2 in)` },
       { label: 'Planted from', quantity: quantity('c', crop?.minimumSoilC ?? null), note: crop?.name },
       { label: 'Soil', quantity: text(`${soilRow.name}: ${soilRow.sandPct} % sand, ${soilRow.clayPct} % clay, ${soilRow.organicMatterPct} % organic matter`) },
       { label: 'Drainage', quantity: text(season.field.drainage === 'tiled' ? 'tiled' : `${season.field.drainage.replace('-poor', ' poorly').replace('poor', 'poorly')} drained`) },

@@ -3,7 +3,7 @@ import type { StretchLists } from '../../../shared/agronomy/plan/problem'
 import { fitAgainAt, StretchListBuilder } from '../../../shared/agronomy/plan/workable'
 import type { FieldSoil } from '../../../shared/agronomy/soil/field-soil'
 import { createFitMarks, markFitHours, type FitMarks } from '../../../shared/agronomy/soil/fit'
-import { copyState, createTrace, runFieldModel, startingState, type FieldTrace } from '../../../shared/agronomy/soil/water-balance'
+import { copyState, createTrace, runFieldModel, startingState, type FieldState, type FieldTrace } from '../../../shared/agronomy/soil/water-balance'
 import type { PlaceWork } from './place-work'
 
 /** What a crop asks of the ground. */
@@ -40,45 +40,55 @@ const SEED_ZONE_MM = 100
  * @returns one ground for each element of `needs`
  */
 export function groundsOf(soil: FieldSoil, place: PlaceWork, needs: readonly CropNeeds[], middle: number, hours: number, scratch: Scratch): Ground[] {
-  const { past, runs, runHours } = place
   const state = startingState(soil)
-  scratch.pastTrace.hours = past.weather.hours
-  runFieldModel(soil, past.weather, past.etoMm, past.localHour, state, scratch.pastTrace)
-  const last = past.weather.hours - 1
-  const now = { seedZoneWater: scratch.pastTrace.water1[last]!, belowWater: scratch.pastTrace.water2[last]!, seedMeanC: scratch.pastTrace.seedMeanC[last]! }
-  const builders = needs.map(() => new StretchListBuilder())
-  const again = needs.map(() => new Float64Array(runs.length).fill(Infinity))
-  const drawn: Ground['middle'][] = []
+  const now = runPast(soil, place, state, scratch)
+  const readings = needs.map((need): Reading => ({ need, builder: new StretchListBuilder(), fitAgainAt: new Float64Array(place.runs.length).fill(Infinity), middle: null }))
   const inRun = startingState(soil)
-  for (const [run, { weather, etoMm, localHour }] of runs.entries()) {
+  for (let run = 0; run < place.runs.length; run++) {
     copyState(state, inRun)
-    scratch.trace.hours = runHours
-    runFieldModel(soil, weather, etoMm, localHour, inRun, scratch.trace)
-    let driesOn = false
-    for (const [crop, { minimumSoilC, chillHours }] of needs.entries()) {
-      markFitHours(soil, scratch.trace, place.ahead.hourOfDay, minimumSoilC, scratch.marks, chillHours)
-      for (const pass of PASSES) builders[crop]!.add(scratch.marks[pass], weather.rainMm, place.rainAt[run]!, 0, hours)
-      if (run === middle) drawn.push(draw(soil, scratch, hours))
-      again[crop]![run] = againIn(scratch, place.rainAt[run]!, runHours)
-      if (place.rainAt[run]! < Infinity && again[crop]![run] === Infinity) driesOn = true
+    runAhead(soil, place, run, inRun, scratch)
+    for (const reading of readings) {
+      mark(soil, place, reading, scratch)
+      for (const pass of PASSES) reading.builder.add(scratch.marks[pass], scratch.trace.rainMm, place.rainAt[run]!, 0, hours)
+      if (run === middle) reading.middle = draw(soil, scratch, hours)
+      reading.fitAgainAt[run] = againIn(place, run, scratch)
     }
-    if (!driesOn) continue
+    if (place.rainAt[run] === Infinity || readings.every(reading => reading.fitAgainAt[run]! < Infinity)) continue
     dryOn(soil, place, inRun, scratch)
-    for (const [crop, { minimumSoilC, chillHours }] of needs.entries()) {
-      if (again[crop]![run]! < Infinity) continue
-      markFitHours(soil, scratch.trace, place.ahead.hourOfDay, minimumSoilC, scratch.marks, chillHours)
-      again[crop]![run] = againIn(scratch, place.rainAt[run]!, scratch.trace.hours)
+    for (const reading of readings) {
+      mark(soil, place, reading, scratch)
+      reading.fitAgainAt[run] = againIn(place, run, scratch)
     }
   }
-  return needs.map((_, crop) => ({ soil, now, workable: builders[crop]!.build(), fitAgainAt: again[crop]!, middle: drawn[crop]! }))
+  return readings.map(({ builder, fitAgainAt, middle: drawn }) => ({ soil, now, workable: builder.build(), fitAgainAt, middle: drawn! }))
 }
 
-function againIn({ marks, trace }: Scratch, rainAt: number, end: number): number {
-  return rainAt < Infinity ? fitAgainAt(marks.plant, trace.rainMm, rainAt, 0, end) : Infinity
+/** What is read off the model for one kind of crop, run by run. */
+interface Reading { need: CropNeeds, builder: StretchListBuilder, fitAgainAt: Float64Array, middle: Ground['middle'] | null }
+
+function runPast(soil: FieldSoil, { past }: PlaceWork, state: FieldState, { pastTrace }: Scratch): Ground['now'] {
+  const last = past.weather.hours - 1
+  pastTrace.hours = past.weather.hours
+  runFieldModel(soil, past.weather, past.etoMm, past.localHour, state, pastTrace)
+  return { seedZoneWater: pastTrace.water1[last]!, belowWater: pastTrace.water2[last]!, seedMeanC: pastTrace.seedMeanC[last]! }
+}
+
+function runAhead(soil: FieldSoil, { runs, runHours }: PlaceWork, run: number, state: FieldState, { trace }: Scratch): void {
+  const { weather, etoMm, localHour } = runs[run]!
+  trace.hours = runHours
+  runFieldModel(soil, weather, etoMm, localHour, state, trace)
+}
+
+function mark(soil: FieldSoil, { ahead }: PlaceWork, { need }: Reading, { trace, marks }: Scratch): void {
+  markFitHours(soil, trace, ahead.hourOfDay, need.minimumSoilC, marks, need.chillHours)
+}
+
+function againIn({ rainAt }: PlaceWork, run: number, { marks, trace }: Scratch): number {
+  return rainAt[run]! < Infinity ? fitAgainAt(marks.plant, trace.rainMm, rainAt[run]!, 0, trace.hours) : Infinity
 }
 
 /** Carries the run on through the dry spell, behind its own hours in the same trace. */
-function dryOn(soil: FieldSoil, { spell, runHours }: PlaceWork, state: Parameters<typeof runFieldModel>[4], scratch: Scratch): void {
+function dryOn(soil: FieldSoil, { spell, runHours }: PlaceWork, state: FieldState, scratch: Scratch): void {
   let rest = scratch.aheadTraces.get(runHours)
   if (!rest) scratch.aheadTraces.set(runHours, rest = traceFrom(scratch.trace, runHours, spell.weather.hours))
   runFieldModel(soil, spell.weather, spell.etoMm, spell.localHour, state, rest)

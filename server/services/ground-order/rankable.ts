@@ -13,6 +13,9 @@ import type { PlaceWork } from './place-work'
 /** Minimum that no soil is under: ground without a crop is judged for tillage only. */
 const NO_MINIMUM_C = -60
 
+/** Nothing is missing then: the field just has no place in an order for planting. */
+export const NOTHING_TO_PLANT = 'Nothing to plant here this season, so the rain costs it no yield'
+
 /** A field with all that the soil model needs, and what may still keep it from being ranked. */
 export interface KnownField {
   season: FieldSeason
@@ -69,7 +72,7 @@ function soilOrNull(soil: SoilRow, { field }: FieldSeason): FieldSoil | null {
 }
 
 function whyUnranked(season: FieldSeason, crop: CropRow | null, noMachine: ReadonlyMap<Pass, string>): string | null {
-  if (!needsPlanting(season)) return 'Nothing to plant here this season, so the rain costs it no yield'
+  if (!needsPlanting(season)) return NOTHING_TO_PLANT
   if (!crop) return 'No crop is set: add one on the Farm page so that planting it can be ranked'
   const missing = PASSES.slice(0, PASSES.indexOf('plant') + 1).find((pass, index) =>
     season.needed[index] && season.doneAc[index]! < season.field.areaAc && noMachine.has(pass))

@@ -9,8 +9,9 @@ export const PASS_MACHINE: Record<Pass, string> = {
   spray: 'sprayer',
 }
 
-/** Length of a wait, as people say it. */
-export function sayAge(milliseconds: number): string {
-  const hours = Math.round(milliseconds / 3_600_000)
-  return hours < 48 ? `${hours} hours` : `${Math.round(hours / 24)} days`
+/** 'Crow Corner', 'Crow Corner and Lantern', 'Crow Corner, Lantern and 4 more'. */
+export function sayNames(names: readonly string[]): string {
+  if (names.length <= 1) return names.join('')
+  if (names.length === 2) return names.join(' and ')
+  return `${names.slice(0, 2).join(', ')} and ${names.length - 2} more`
 }

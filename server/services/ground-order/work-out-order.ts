@@ -11,13 +11,15 @@ import { localHours } from './local-hours'
 import { passesWithoutMachine, rateOf, whatMachineMisses } from './machine-hours'
 import { orderPlan } from './order-plan'
 import { PAST_HOURS, SPELL_HOURS } from './place-work'
-import { isKnown, lookUpField, type KnownField } from './rankable'
+import { isKnown, lookUpField, NOTHING_TO_PLANT, type KnownField } from './rankable'
 import { rankedRows } from './ranked-rows'
 import { ribbon } from './ribbon'
 import { sayFor } from './say'
+import { sayNames } from './words'
 
-/** Works out a farm's Ground order. The same inputs give the same answer, to the byte. */
-export function workOutOrder(inputs: FarmInputs): GroundOrder {
+/** Works out a farm's Ground order. The same inputs give the same answer, to the byte, in whatever order they come. */
+export function workOutOrder(given: FarmInputs): GroundOrder {
+  const inputs = { ...given, fields: byId(given.fields), machines: byId(given.machines) }
   const { farm, now } = inputs
   const startsAt = Math.floor(now.getTime() / 3_600_000) * 3600
   const at = (hour: number) => new Date(Math.round((startsAt + hour * 3600) * 1000)).toISOString()
@@ -42,6 +44,10 @@ export function workOutOrder(inputs: FarmInputs): GroundOrder {
     },
     missing: missingWords(inputs, seasons, rows),
   }
+}
+
+function byId<Row extends { id: string }>(rows: readonly Row[]): Row[] {
+  return [...rows].sort((a, b) => a.id < b.id ? -1 : 1)
 }
 
 function rainOf({ reference, hours }: FarmPlaces): RainOnset & { middle: number } {
@@ -139,10 +145,15 @@ function totalStake(rows: readonly GroundRow[]): number | null {
 /** One plain sentence for each thing that keeps the order from being whole. */
 function missingWords({ machines, forecast }: FarmInputs, seasons: readonly FieldSeason[], rows: readonly GroundRow[]): string[] {
   const wanted = new Set(seasons.flatMap(({ field, next }) => next === null ? [] : field.chain))
+  const noMachine = [...passesWithoutMachine(machines, wanted).values()]
+  const fields = new Map<string, string[]>()
+  for (const { rank, reason, name } of rows) {
+    if (rank === null && reason !== NOTHING_TO_PLANT && !noMachine.includes(reason)) fields.set(reason, [...fields.get(reason) ?? [], name])
+  }
   return [
     ...(forecast.trouble ? [forecast.trouble] : []),
     ...machines.flatMap(machine => whatMachineMisses(machine) ?? []),
-    ...[...passesWithoutMachine(machines, wanted).values()].map(sentence => `${sentence}.`),
-    ...rows.filter(row => row.rank === null).map(row => `${row.name}: ${row.reason}.`),
+    ...noMachine.map(sentence => `${sentence}.`),
+    ...[...fields].map(([reason, names]) => `${sayNames(names)}: ${reason}.`),
   ]
 }

@@ -20,7 +20,9 @@ export const weatherPullJob: Job = {
   },
   async run(app, at) {
     const { weather } = app.settings
-    gateway ??= createOpenMeteo(weather, app.clock.now, { random: Math.random, sleep: ms => new Promise(resolve => setTimeout(resolve, ms)) })
+    // The demo's time is invented, so there is no sense in waiting in real time before another try.
+    const sleep = (ms: number) => new Promise<void>(resolve => setTimeout(resolve, app.demoClock ? 0 : ms))
+    gateway ??= createOpenMeteo(weather, app.clock.now, { random: Math.random, sleep })
     await pullWeather({ db: app.db, now: at, gateway, model: { forecast: weather.forecastModel, runs: weather.runsModel } })
     for (const farm of listFarms(app.db)) announceChange(farm.id)
   },

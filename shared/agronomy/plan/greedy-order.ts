@@ -11,6 +11,8 @@ interface Crew { freeAt: Float64Array, at: Int32Array }
 /** What comes of taking a field next: for each pass, the hours by which it has started in 8 of 10 runs, and is finished in half of them. */
 interface Prospect { savedPerHourUsd: number, startsAt: Float64Array, finishesAt: Float64Array }
 const SURE_ENOUGH = 0.8
+/** Less than this is rounding, not worth, $. */
+const CENT = 0.01
 
 /** Machines that must not be kept waiting: the planter only, or all that work before planting ends. */
 export type KeepBusy = 'planter' | 'every machine'
@@ -21,14 +23,15 @@ export type KeepBusy = 'planter' | 'every machine'
  * At each step every field left is simulated as the next one in all runs. Fields at which a machine would still wait, in
  * 2 of 10 runs or more, when it could have finished another whole field are passed over. Of the others the one that
  * saves most per planter hour is taken: (worth when taken next − worth when left to the last) ÷ the planter hours it
- * needs. Ties fall to the field that comes first in the problem.
+ * needs. When two save the same, as when both are done before rain either way, the one with more at stake per planter
+ * hour is taken, then the one that comes first in the problem.
  *
  * @returns fields in the order to do them
  */
 export function greedyOrder(problem: PlanProblem, keepBusy: KeepBusy): number[] {
   const timeline = createTimeline(problem.fields.length)
-  const all = problem.fields.map((_, field) => field)
-  const lastUsd = worthBehindAllUsd(problem, timeline)
+  const all = byStakePerHour(problem)
+  const lastUsd = worthBehindAllUsd(problem, all, timeline)
   const crew = newCrew(problem)
   const assignment = emptyAssignment(problem)
   const list: number[] = []
@@ -56,10 +59,10 @@ function sendCrew(problem: PlanProblem, field: number, assignment: Assignment, c
 }
 
 /** Worth of each field, mean over the runs, if it were begun when the crew is through with all of them: a yardstick for 'last'. */
-function worthBehindAllUsd(problem: PlanProblem, timeline: Timeline): Float64Array {
+function worthBehindAllUsd(problem: PlanProblem, list: readonly number[], timeline: Timeline): Float64Array {
   const crew = newCrew(problem)
   const assignment = emptyAssignment(problem)
-  for (const field of byStakePerHour(problem)) sendCrew(problem, field, assignment, crew, timeline)
+  for (const field of list) sendCrew(problem, field, assignment, crew, timeline)
   const worthUsd = new Float64Array(problem.fields.length)
   for (let field = 0; field < problem.fields.length; field++) {
     for (let run = 0; run < problem.runs; run++) {
@@ -135,7 +138,7 @@ function bestProspect(prospects: readonly Prospect[], firstPass: number): number
   let best = -1
   for (const [index, prospect] of prospects.entries()) {
     if (!noneStarts && keepsWaiting(prospect)) continue
-    if (best < 0 || prospect.savedPerHourUsd > prospects[best]!.savedPerHourUsd) best = index
+    if (best < 0 || prospect.savedPerHourUsd > prospects[best]!.savedPerHourUsd + CENT) best = index
   }
   return best
 }

@@ -45,6 +45,8 @@ export interface Say {
   money: (usd: number) => string
 }
 
+/** Saved per planter hour under this counts as nothing, $. */
+const LEAST_PER_HOUR_USD = 1
 /** At stake under this counts as nothing, $. */
 const LEAST_USD = 10
 /** Part of a field that must get planted before rain for it to be worth saying, 0 to 1. */
@@ -105,12 +107,12 @@ function unlikely(facts: ReasonFacts, say: Say): string {
 }
 
 function likely(facts: ReasonFacts, savedUsd: number, say: Say): string {
-  if (facts.ground === 'fit' && facts.savesMost) return 'Fit now, and the most money per planter hour'
+  if (facts.ground === 'fit' && facts.savesMost && savedUsd >= LEAST_PER_HOUR_USD) return 'Fit now, and the most money per planter hour'
   if (facts.driesFirst) return `${fitSince(facts, say)}; dries fast again, so it can wait`
   if (facts.staysWetLongest) return `${fitSince(facts, say)}; stays wet longest once rained on`
   if (facts.nextDoorTo !== null) return `${fitSince(facts, say)}; next door to ${facts.nextDoorTo}`
-  if (savedUsd >= 1) return `${fitSince(facts, say)}; saves ${say.money(savedUsd)} per planter hour`
-  return `${fitSince(facts, say)}; nothing lost by going last`
+  if (savedUsd >= LEAST_PER_HOUR_USD) return `${fitSince(facts, say)}; saves ${say.money(savedUsd)} per planter hour`
+  return `${fitSince(facts, say)}; ${facts.rainAt === null ? 'no rain in sight' : 'done before the rain even if it goes last'}`
 }
 
 function fitSince({ ground, fitAt }: ReasonFacts, say: Say): string {

@@ -16,5 +16,7 @@ export default defineEventHandler(async (event) => {
     clearInterval(beat)
     await stream.close()
   })
+  // Without a first word the browser would not know that it is connected.
+  void stream.push({ event: 'beat', data: '1' })
   return stream.send()
 })

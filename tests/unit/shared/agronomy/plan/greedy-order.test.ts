@@ -50,6 +50,11 @@ describe('greedyOrder', () => {
     expect(greedyOrder(problem, 'every machine')).toEqual([0, 2, 1])
   })
 
+  it('goes by what is at stake when every field is done before rain either way', () => {
+    const fields = [{ areaAc: 50, usdPerAc: 300, ...planted }, { areaAc: 50, usdPerAc: 800, ...planted }]
+    expect(greedyOrder(planProblem(farm(fields)), 'planter')).toEqual([1, 0])
+  })
+
   it('takes every field once', () => {
     fc.assert(fc.property(randomFarm, fc.constantFrom('planter' as const, 'every machine' as const), (random, keepBusy) => {
       expect([...greedyOrder(planProblem(random), keepBusy)].sort((a, b) => a - b)).toEqual(random.fields.map((_, field) => field))

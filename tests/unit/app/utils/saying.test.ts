@@ -1,0 +1,41 @@
+import { describe, expect, it } from 'vitest'
+import { hoursBetween, sayAge, sayClock, sayDay, sayDayClock, sayNow } from '../../../../app/utils/local-time'
+import { safeNext } from '../../../../app/utils/safe-next'
+import { sayChance, shortChance } from '../../../../app/utils/say-chance'
+import { round, widthOf, xOf, xWithin } from '../../../../app/utils/time-axis'
+
+describe('times', () => {
+  it('are the farm’s own, in words', () => {
+    expect(sayDayClock('2025-05-08T20:00:00Z', 'America/Chicago')).toBe('Thursday 3 pm')
+    expect([sayClock('2025-05-06T15:30:00Z', 'America/Chicago'), sayClock('2025-05-06T17:00:00Z', 'America/Chicago'), sayClock('2025-05-06T05:00:00Z', 'America/Chicago')]).toEqual(['10:30 am', 'noon', 'midnight'])
+    expect(sayNow('2025-05-06T10:00:00Z', 'America/Chicago')).toBe('Tue 6 May, 5:00 am')
+    expect(sayDay('2025-05-06T04:00:00Z', 'America/Chicago')).toBe('Mon 5')
+  })
+
+  it('tell ages in words', () => {
+    expect(['2025-05-06T09:59:50Z', '2025-05-06T09:40:00Z', '2025-05-06T06:40:00Z', '2025-05-03T06:00:00Z'].map(from => sayAge(from, '2025-05-06T10:00:00Z'))).toEqual(['just now', '20 min ago', '3 h 20 min ago', '3 days ago'])
+    expect(hoursBetween('2025-05-06T10:00:00Z', '2025-05-08T20:00:00Z')).toBe(58)
+  })
+})
+
+describe('chances', () => {
+  it('are said to the tenth, and never as 0 or 100', () => {
+    expect([0.006, 0.12, 0.46, 0.94, 0.994].map(sayChance)).toEqual(['under 5%', '10%', '50%', '90%', 'over 95%'])
+    expect([0.006, 0.994].map(shortChance)).toEqual(['<5%', '>95%'])
+  })
+})
+
+describe('the time axis', () => {
+  const axis = { startsAt: '2025-05-06T10:00:00Z', hours: 120, pxPerHour: 6.8 }
+  it('is linear, 6.8 px an hour', () => {
+    expect(widthOf(axis)).toBe(816)
+    expect(xOf(axis, '2025-05-08T20:00:00Z')).toBe(round(58 * 6.8))
+    expect([xWithin(axis, '2025-05-01T00:00:00Z'), xWithin(axis, '2025-06-01T00:00:00Z')]).toEqual([0, 816])
+  })
+})
+
+describe('safeNext', () => {
+  it.each([['/brindle-marsh/today', '/brindle-marsh/today'], ['//elsewhere.example/today', '/'], ['https://elsewhere.example', '/'], ['javascript:alert(1)', '/'], ['/\\elsewhere.example/today', '/'], [undefined, '/'], [['/a/today'], '/']])('%s leads to %s', (next, expected) => {
+    expect(safeNext(next)).toBe(expected)
+  })
+})
