@@ -28,7 +28,7 @@ describe('jobs', () => {
     temporary = temporaryDatabase()
     const machine = { now: () => new Date(0) }
     const demoClock = createDemoClock(NOW, machine)
-    app = { db: temporary.db, sqlite: temporary.sqlite, clock: demoClock, demoClock, settings: readSettings({ NUXT_SESSION_PASSWORD: 'x'.repeat(40) }, { fakesLoaded: false, built: false }) }
+    app = { db: temporary.db, sqlite: temporary.sqlite, clock: demoClock, demoClock, settings: readSettings({ NUXT_SESSION_PASSWORD: 'x'.repeat(40) }, false) }
     ran.length = 0
     fails = false
   })
