@@ -1,4 +1,5 @@
 import { delay, http, HttpResponse } from 'msw'
+import { DEMO_START } from '../server/services/clock'
 import { troubleInForce, type Trouble } from './trouble'
 import { availableAt, column, isVariable, newestCycle, RUNS } from './world/service'
 import type { Place } from './world/season'
@@ -6,13 +7,12 @@ import type { Place } from './world/season'
 /** The invented weather service, in the shapes of the real one (Open-Meteo). Its data says that it is invented. */
 
 const HOURS_MS = 3_600_000
-const DEMO_START_MS = Date.parse('2025-05-06T10:00:00Z')
 const INVENTED = { 'x-invented': 'weather' }
 
 /** The server's own clock, which the demo can move on; without a server, the morning that the demo starts. */
 function nowHours(): number {
   const clock = (globalThis as Record<symbol, unknown>)[Symbol.for('sillion.clock')] as (() => Date) | undefined
-  return (clock?.().getTime() ?? DEMO_START_MS) / HOURS_MS
+  return (clock?.() ?? DEMO_START).getTime() / HOURS_MS
 }
 
 export const handlers = [

@@ -4,6 +4,7 @@ import { TZDate } from '@date-fns/tz'
 import { openDatabase, type Db } from '../../server/db/client'
 import { readMigrations } from '../../server/db/migrations-module'
 import * as schema from '../../server/db/schema'
+import { DEMO_START } from '../../server/services/clock'
 import { hashPassword } from '../../server/services/passwords'
 import { placeFor } from '../../server/services/weather/places'
 import type { CropId, FarmId, FieldId, MachineId, PassRecordId, PersonId, SoilId } from '../../shared/types/ids'
@@ -15,7 +16,6 @@ import type { DemoFarm, DemoField } from '../farms/demo-farm'
 export const DEMO_FARMS = [brindleMarsh, cairnFlats]
 /** Printed in the README: a demo's password keeps nobody out. */
 export const DEMO_PASSWORD = 'wet ground shines at dawn'
-export const DEMO_START = new Date('2025-05-06T10:00:00Z')
 const KM_PER_DEGREE = 111.2
 
 /** Puts the demo farms into an empty database under DATA_DIR, and notes the sign-ins beside it. */

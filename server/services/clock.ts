@@ -12,6 +12,9 @@ export interface DemoClock extends Clock {
   moveTo: (instant: Date) => void
 }
 
+/** When the demo begins: Tuesday 6 May 2025, 5:00 am at its first farm. */
+export const DEMO_START = new Date('2025-05-06T10:00:00Z')
+
 export const systemClock: Clock = { now: () => new Date(Date.now()) }
 
 /** A clock that shows `start` now and runs on from there. */

@@ -3,11 +3,9 @@ import { openDatabase, type Migration } from '../db/client'
 import { findDemoClock, keepDemoClock } from '../db/queries/demo-clock'
 import { countDemoPeople } from '../db/queries/people'
 import { setApp } from './app'
-import { createDemoClock, systemClock } from './clock'
+import { createDemoClock, DEMO_START, systemClock } from './clock'
 import { readSettings } from './settings'
 
-/** Tuesday 6 May 2025, 5:00 am at the demo farm. */
-export const DEMO_START = new Date('2025-05-06T10:00:00Z')
 /** How fakes in this process say that they are there, and read the server's clock. */
 const FAKES = Symbol.for('sillion.fakes')
 const CLOCK = Symbol.for('sillion.clock')
