@@ -4,6 +4,7 @@ import { spawn } from 'node:child_process'
 import { randomBytes } from 'node:crypto'
 import { existsSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
 import { join } from 'node:path'
+import { demoEnv } from './demo-env.mjs'
 import { buildWhenNeeded, installWhenNeeded, root, run, step, stop } from './set-up.mjs'
 
 const port = process.env.PORT || '3000'
@@ -14,17 +15,7 @@ await installWhenNeeded()
 await buildWhenNeeded()
 if (process.argv.includes('--fresh')) rmSync(dataDir, { recursive: true, force: true })
 mkdirSync(dataDir, { recursive: true })
-const env = {
-  NODE_ENV: 'production',
-  SILLION_DEMO: '1',
-  DATA_DIR: dataDir,
-  PORT: port,
-  NITRO_PORT: port,
-  PUBLIC_ORIGIN: address,
-  NUXT_SESSION_NAME: 'sillion',
-  NUXT_SESSION_COOKIE_SECURE: 'false',
-  NUXT_SESSION_PASSWORD: demoSecret(),
-}
+const env = demoEnv({ port, dataDir, secret: demoSecret() })
 await step('Setting up the demo farms', async () => {
   const { code, output } = await run('node', ['.ci/run-typescript.mjs', 'mocks/demo/seed.ts'], { quiet: true, env })
   if (code !== 0) stop(`${output.slice(-2000)}\nThe demo farms could not be set up. Remove ${dataDir} and run the command again.`)

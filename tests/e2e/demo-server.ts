@@ -5,6 +5,7 @@ import { createServer } from 'node:net'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { fileURLToPath } from 'node:url'
+import { demoEnv } from '../../.ci/demo-env.mjs'
 
 const root = fileURLToPath(new URL('../..', import.meta.url))
 
@@ -29,15 +30,7 @@ export async function startDemoServer(settings: Record<string, string> = {}): Pr
   writeFileSync(troubleFile, '')
   const env = {
     ...process.env,
-    NODE_ENV: 'production',
-    SILLION_DEMO: '1',
-    DATA_DIR: dataDir,
-    PORT: port,
-    NITRO_PORT: port,
-    PUBLIC_ORIGIN: address,
-    NUXT_SESSION_NAME: 'sillion',
-    NUXT_SESSION_COOKIE_SECURE: 'false',
-    NUXT_SESSION_PASSWORD: 'only-for-the-end-to-end-tests-and-nobody',
+    ...demoEnv({ port, dataDir, secret: 'only-for-the-end-to-end-tests-and-nobody' }),
     SILLION_WEATHER_TROUBLE: troubleFile,
     ...settings,
   }
