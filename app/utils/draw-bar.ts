@@ -8,15 +8,14 @@ const BODY = 12
 export function barPath(pass: Pass, x: number, y: number, width: number): string {
   const right = round(x + width)
   const low = y + BODY
-  if (pass === 'dig' && width >= 6) return `M${x} ${y}H${right}V${low}${edge(right, width, 3.2, step => `l${-step / 2} 3.8l${-step / 2} -3.8`)}Z`
-  if (pass === 'rocks' && width >= 8) return `M${x} ${y}H${right}V${low}${edge(right, width, 4, step => `a${step / 2} 3.4 0 0 1 ${-step} 0`)}Z`
+  if (pass === 'dig' && width >= 6) return `M${x} ${y}H${right}V${low}${edge(width, 3.2, step => `l${-step / 2} 3.8l${-step / 2} -3.8`)}Z`
+  if (pass === 'rocks' && width >= 8) return `M${x} ${y}H${right}V${low}${edge(width, 4, step => `a${step / 2} 3.4 0 0 1 ${-step} 0`)}Z`
   return `M${x} ${y}H${right}V${low}H${x}Z`
 }
 
-function edge(_right: number, width: number, half: number, one: (step: number) => string): string {
+function edge(width: number, half: number, one: (step: number) => string): string {
   const count = Math.max(1, Math.round(width / (2 * half)))
-  const step = round(width / count * 100) / 100
-  return one(Math.round(step * 100) / 100).repeat(count)
+  return one(Math.round(width / count * 100) / 100).repeat(count)
 }
 
 /** Places of seeds or drops under a bar. */

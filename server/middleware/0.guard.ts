@@ -10,7 +10,6 @@ const READS = new Set(['GET', 'HEAD'])
 export default defineEventHandler((event) => {
   event.context.requestId = randomUUID()
   event.context.nonce = randomBytes(16).toString('base64')
-  event.context.privateAnswer = true
   setResponseHeaders(event, {
     'cache-control': 'no-store',
     'content-security-policy': contentPolicy(event.context.nonce as string),

@@ -1,5 +1,5 @@
 import { and, count, eq, isNull } from 'drizzle-orm'
-import type { FarmId, PersonId } from '../../../shared/types/ids'
+import type { PersonId } from '../../../shared/types/ids'
 import type { DbOrTransaction } from '../client'
 import { farms, memberships, people } from '../schema'
 
@@ -34,8 +34,4 @@ export function findFarmOfPerson(db: DbOrTransaction, slug: string, personId: Pe
   return db.select({ farm: farms, role: memberships.role })
     .from(memberships).innerJoin(farms, eq(farms.id, memberships.farmId))
     .where(and(eq(farms.slug, slug), eq(memberships.personId, personId))).get()
-}
-
-export function findMembership(db: DbOrTransaction, farmId: FarmId, personId: PersonId) {
-  return db.select().from(memberships).where(and(eq(memberships.farmId, farmId), eq(memberships.personId, personId))).get()
 }
