@@ -110,7 +110,7 @@ function explainSaved(plan: OrderPlan, field: number): Explanation {
       { label: 'Planter hours it needs', quantity: quantity('h', planterHours[field]!) },
       { label: 'Saved per planter hour', quantity: quantity('usd/h', saved / planterHours[field]!) },
     ],
-    sources: ['Each field in turn: the one that saves most per planter hour, of those that don’t keep the planter waiting'],
-    unsure: 'One field after another is taken; a whole order that is a little better may exist. Fuel and road hours aren’t charged.',
+    sources: ['The best of five quick orders: by what a planter hour saves, with the planter or every machine kept busy; most money first; nearest first; driest first'],
+    unsure: 'It is no search: a better order may exist. Ground that isn’t fit yet may stand behind ground that saves less. Fuel and road hours aren’t charged.',
   }
 }

@@ -39,6 +39,8 @@ export interface FarmInputs {
   crops: CropRow[]
   machines: MachineRow[]
   passTotals: PassTotal[]
+  /** where the farm's places lie */
+  places: readonly { id: PlaceId, latitude: number, longitude: number }[]
   /** by place; a sentence where there is no weather to use */
   weather: Map<PlaceId, UsableWeather | { missing: string }>
   forecast: ForecastSummary

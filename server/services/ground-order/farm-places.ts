@@ -39,7 +39,7 @@ function checkedWeather(weather: UsableWeather, startsAt: number): UsableWeather
 
 /** A gap in the weather is a sentence, not a failure: other places may be whole. */
 function workOf(id: PlaceId, weather: UsableWeather, inputs: FarmInputs, runs: number, hours: number): PlaceWork | { missing: string } {
-  const point = inputs.fields.find(field => field.placeId === id) ?? inputs.farm
+  const point = inputs.places.find(place => place.id === id) ?? inputs.farm
   try {
     return placeWork(weather, point, inputs.farm.zone, runs, hours)
   }
@@ -49,13 +49,13 @@ function workOf(id: PlaceId, weather: UsableWeather, inputs: FarmInputs, runs: n
   }
 }
 
-function nearest({ farm, fields }: FarmInputs, works: FarmPlaces['works']): PlaceWork | null {
+function nearest({ farm, places }: FarmInputs, works: FarmPlaces['works']): PlaceWork | null {
   let best: PlaceWork | null = null
   let least = Infinity
   for (const [id, work] of works) {
-    const field = fields.find(row => row.placeId === id)
-    if ('missing' in work || !field) continue
-    const km = greatCircleKm(farm, field)
+    const place = places.find(row => row.id === id)
+    if ('missing' in work || !place) continue
+    const km = greatCircleKm(farm, place)
     if (km < least) [best, least] = [work, km]
   }
   return best

@@ -1,5 +1,6 @@
 import { PASSES } from '../../../shared/agronomy/ground'
 import type { StretchLists } from '../../../shared/agronomy/plan/problem'
+import { closeSprayHours } from '../../../shared/agronomy/plan/spray-hours'
 import { fitAgainAt, StretchListBuilder } from '../../../shared/agronomy/plan/workable'
 import type { FieldSoil } from '../../../shared/agronomy/soil/field-soil'
 import { createFitMarks, markFitHours, type FitMarks } from '../../../shared/agronomy/soil/fit'
@@ -49,6 +50,7 @@ export function groundsOf(soil: FieldSoil, place: PlaceWork, needs: readonly Cro
     runAhead(soil, place, run, inRun, scratch)
     for (const reading of readings) {
       mark(soil, place, reading, scratch)
+      closeSprayHours(scratch.marks.spray, place.runs[run]!.weather)
       for (const pass of PASSES) reading.builder.add(scratch.marks[pass], scratch.trace.rainMm, place.rainAt[run]!, 0, hours)
       if (run === middle) reading.middle = draw(soil, scratch, hours)
       reading.fitAgainAt[run] = againIn(place, run, scratch)

@@ -1,4 +1,5 @@
 import { TZDate } from '@date-fns/tz'
+import { greatCircleKm } from '../../../shared/agronomy/machine/road'
 import type { FarmId } from '../../../shared/types/ids'
 import type { ForecastSummary, GroundOrder } from '../../../shared/types/ground-order'
 import type { Db } from '../../db/client'
@@ -7,13 +8,14 @@ import type { Farm } from '../../db/queries/farms'
 import { listFields } from '../../db/queries/fields'
 import { listMachines } from '../../db/queries/machines'
 import { listPassTotals } from '../../db/queries/pass-records'
-import { listPlacesOfFarm } from '../../db/queries/places'
+import { listPlacesOfFarm, type PlaceRow } from '../../db/queries/places'
 import { listSoils } from '../../db/queries/soils'
 import { findNewestPull } from '../../db/queries/weather-pulls'
 import { forecastSummary } from '../weather/forecast-summary'
 import { freshness } from '../weather/freshness'
 import { weatherFor } from '../weather/weather-for'
 import type { FarmInputs } from './farm-inputs'
+import { fieldSeason, isPlanted, type FieldSeason } from './field-season'
 import { PAST_HOURS } from './place-work'
 import { workOutOrder } from './work-out-order'
 
@@ -58,6 +60,8 @@ function freshnessOf({ fetchedAt, status }: ForecastSummary, now: Date): Forecas
 function loadInputs(db: Db, farm: Farm, now: Date): FarmInputs {
   const places = listPlacesOfFarm(db, farm.id)
   const fields = listFields(db, farm.id)
+  const passTotals = listPassTotals(db, farm.id, seasonStart(now, farm.zone))
+  const wanted = placesWanted(places, farm, fields.map(field => fieldSeason(field, passTotals)))
   return {
     farm,
     now,
@@ -65,10 +69,18 @@ function loadInputs(db: Db, farm: Farm, now: Date): FarmInputs {
     soils: listSoils(db, farm.id),
     crops: listCrops(db, farm.id),
     machines: listMachines(db, farm.id),
-    passTotals: listPassTotals(db, farm.id, seasonStart(now, farm.zone)),
-    weather: new Map(places.map(place => [place.id, weatherFor(db, place, now, { pastHours: PAST_HOURS, aheadHours: AHEAD_HOURS })])),
+    passTotals,
+    places,
+    weather: new Map(wanted.map(place => [place.id, weatherFor(db, place, now, { pastHours: PAST_HOURS, aheadHours: AHEAD_HOURS })])),
     forecast: forecastSummary(db, places.map(place => place.id), farm.invented, now),
   }
+}
+
+/** The places of fields that are still to be planted, and the one nearest to the farm, which the ribbon is drawn from. */
+function placesWanted(places: readonly PlaceRow[], farm: Farm, seasons: readonly FieldSeason[]): PlaceRow[] {
+  const open = new Set(seasons.filter(season => !isPlanted(season)).map(({ field }) => field.placeId))
+  const nearest = places.toSorted((a, b) => greatCircleKm(farm, a) - greatCircleKm(farm, b))[0]
+  return places.filter(place => open.has(place.id) || place.id === nearest?.id)
 }
 
 /** Work of the season counts from the first of January at the farm. */

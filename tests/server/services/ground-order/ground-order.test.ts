@@ -82,7 +82,7 @@ describe('groundOrder', () => {
   })
 
   it('goes on with the last good forecast when the service fails, says what is wrong, and stops when it is too old', async () => {
-    setTrouble('refused')
+    setTrouble('503')
     await expect(pull(later(3))).rejects.toThrow()
     const late = order(later(3))
     expect(late.forecast.status).toBe('late')

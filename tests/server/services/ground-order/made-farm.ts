@@ -8,6 +8,7 @@ export const STARTS_AT = Date.UTC(2025, 4, 6, 10) / 1000
 const PAST_HOURS = 60 * 24
 const farmId = 'made' as FarmId
 export const PLACE = 'here' as PlaceId
+export const THERE = 'there' as PlaceId
 
 /** Mild dry spring days, the same every day at the farm's clock, with rain where it is asked for. */
 function hourly(startsAt: number, hours: number, rainMm: (hour: number) => number): HourlyWeather {
@@ -73,6 +74,7 @@ export function madeFarm(over: Partial<FarmInputs> = {}): FarmInputs {
     crops: [crop('corn', 'Corn', 'corn', 'corn-minnesota-1', 5), crop('cold-corn', 'Corn', 'corn', 'corn-minnesota-1', 25), crop('wheat', 'Wheat', 'wheat', 'wheat-us-2', 4)],
     machines: [madeMachine('Badger', 'dig'), madeMachine('Jay', 'plant')],
     passTotals: [],
+    places: [{ id: PLACE, latitude: 46.9, longitude: -96.8 }, { id: THERE, latitude: 47.1, longitude: -96.8 }],
     weather: new Map([[PLACE, madeWeather([50, 55, 60])]]),
     forecast: {
       status: 'fresh', issuedAt: '2025-05-06T09:40:00.000Z', fetchedAt: '2025-05-06T09:41:00.000Z', runs: 3, source: 'made', invented: true, trouble: null,

@@ -3,7 +3,7 @@ import type { FarmInputs } from '../../../../server/services/ground-order/farm-i
 import { workOutOrder } from '../../../../server/services/ground-order/work-out-order'
 import type { GroundOrder } from '../../../../shared/types/ground-order'
 import type { CropId, FieldId, PlaceId, SoilId } from '../../../../shared/types/ids'
-import { madeFarm, madeField, madeMachine, madeWeather, NOW, PLACE } from './made-farm'
+import { madeFarm, madeField, madeMachine, madeWeather, NOW, PLACE, THERE } from './made-farm'
 
 const order = (over: Partial<FarmInputs> = {}) => workOutOrder(madeFarm(over))
 const row = (worked: GroundOrder, name: string) => worked.rows.find(field => field.name === name)!
@@ -153,8 +153,7 @@ describe('workOutOrder, with something missing', () => {
   })
 
   it('takes what places have in common when their runs differ in number and length', () => {
-    const there = 'there' as PlaceId
-    const worked = order({ fields: [madeField('North'), madeField('South', { placeId: there, latitude: 47.1 })], weather: new Map([[PLACE, madeWeather([50, 55, 60])], [there, madeWeather([50, 55], 8, 96)]]) })
+    const worked = order({ fields: [madeField('North'), madeField('South', { placeId: THERE, latitude: 47.1 })], weather: new Map([[PLACE, madeWeather([50, 55, 60])], [THERE, madeWeather([50, 55], 8, 96)]]) })
     expect(worked.axis.hours).toBe(96)
     expect(worked.rows.map(field => field.doneBeforeRain!.of)).toEqual([2, 2])
   })
