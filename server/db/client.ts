@@ -21,6 +21,7 @@ export interface OpenDatabase { db: Db, sqlite: Database.Database, close: () => 
 export function openDatabase(file: string, migrations: Migration[]): OpenDatabase {
   const sqlite = open(file)
   try {
+    refuseDamaged(sqlite, file)
     migrate(sqlite, file, migrations)
   }
   catch (error) {
@@ -45,6 +46,11 @@ function open(file: string): Database.Database {
   catch (cause) {
     throw new Error(`The database ${file} can't be opened: ${describe(cause)} Check that DATA_DIR exists, can be written and has room.`, { cause })
   }
+}
+
+function refuseDamaged(sqlite: Database.Database, file: string): void {
+  const [found] = sqlite.prepare('pragma quick_check(1)').pluck().all() as string[]
+  if (found !== 'ok') throw new Error(`The database ${file} is damaged (${found?.replaceAll(/\s+/g, ' ')}). Put back a copy of it, or move it away to start with an empty one.`)
 }
 
 function migrate(sqlite: Database.Database, file: string, migrations: Migration[]): void {

@@ -1,7 +1,7 @@
 import { brotliCompress, constants, gzip } from 'node:zlib'
 import { promisify } from 'node:util'
-import { getRequestHeader, getResponseHeader, getResponseStatus, removeResponseHeader, setResponseHeader, setResponseStatus, type H3Event } from 'h3'
-import { log } from '../services/log'
+import { getRequestHeader, getResponseHeader, removeResponseHeader, setResponseHeader, type H3Event } from 'h3'
+import { withholdUnasked } from '../utils/asked'
 
 const brotli = promisify(brotliCompress)
 const deflate = promisify(gzip)
@@ -24,14 +24,6 @@ export default defineNitroPlugin((nitro) => {
   })
 })
 
-/** Fails closed: a handler of the API that never asked for a permission gives no answer away. */
-function withholdUnasked(event: H3Event, response: { body?: unknown }): void {
-  if (!event.path.startsWith('/api/') || event.context.authorised || getResponseStatus(event) >= 400) return
-  log('error', 'A route answered without asking for a permission.', { route: event.path.split('?')[0] })
-  setResponseStatus(event, 500)
-  response.body = { error: { code: 'internal', message: 'Something went wrong on our side.', requestId: event.context.requestId } }
-}
-
 async function compress(event: H3Event, response: { body?: unknown }): Promise<void> {
   // Nuxt draws its error page by asking itself, and wants that answer plain.
   if (event.method === 'HEAD' || event.path.startsWith('/__nuxt_error') || getResponseHeader(event, 'content-encoding') || response.body === null || response.body === undefined) return
@@ -42,14 +34,22 @@ async function compress(event: H3Event, response: { body?: unknown }): Promise<v
   const text = isText ? response.body as string : JSON.stringify(response.body)
   response.body = text
   if (text.length < LEAST_BYTES) return
-  const accepted = String(getRequestHeader(event, 'accept-encoding') ?? '')
   setResponseHeader(event, 'vary', 'Accept-Encoding')
-  if (/\bbr\b/.test(accepted)) {
-    setResponseHeader(event, 'content-encoding', 'br')
+  const accepted = getRequestHeader(event, 'accept-encoding') ?? ''
+  if (accepts(accepted, 'br')) {
     response.body = await brotli(text, { params: { [constants.BROTLI_PARAM_QUALITY]: 4 } })
+    setResponseHeader(event, 'content-encoding', 'br')
   }
-  else if (/\bgzip\b/.test(accepted)) {
-    setResponseHeader(event, 'content-encoding', 'gzip')
+  else if (accepts(accepted, 'gzip')) {
     response.body = await deflate(text)
+    setResponseHeader(event, 'content-encoding', 'gzip')
   }
+}
+
+/** True when the header names the coding and does not weigh it with 0. */
+function accepts(header: string, coding: string): boolean {
+  return header.split(',').some((part) => {
+    const [name, ...weights] = part.split(';').map(piece => piece.trim().toLowerCase())
+    return name === coding && !weights.some(weight => /^q=0(\.0*)?$/.test(weight))
+  })
 }

@@ -11,12 +11,21 @@ const MOST_PASSWORD_LENGTH = 512
 
 /** One hash at a time: it takes a core for a tenth of a second, and other requests want one too. */
 let queue: Promise<unknown> = Promise.resolve()
+let waiting = 0
+/** Hashes that may wait: the last of them takes some seconds, and a person waits no longer. */
+const MOST_WAITING = 20
+
+/** True when so many hashes wait that another would only make all of them late. */
+export function isHashingBusy(): boolean {
+  return waiting >= MOST_WAITING
+}
 
 function derive(password: string, salt: Buffer, options: ScryptOptions): Promise<Buffer> {
+  waiting++
   const next = queue.then(() => new Promise<Buffer>((resolve, reject) => {
     scrypt(password.normalize('NFKC'), salt, KEY_BYTES, { ...options, maxmem: MEMORY }, (error, key) => error ? reject(error) : resolve(key))
   }))
-  queue = next.catch(() => undefined)
+  queue = next.catch(() => undefined).then(() => waiting--)
   return next
 }
 

@@ -1,7 +1,8 @@
 import { handlers } from '#nitro-internal-virtual/server-handlers'
 
-/** Methods that some route of the API answers at a path. */
-export function routeMethods(path: string): string[] {
+/** Methods that some route of the API answers at a path, with or without a slash at its end. */
+export function routeMethods(pathAsWritten: string): string[] {
+  const path = pathAsWritten.replace(/\/$/, '')
   const matching = handlers.filter(handler => handler.method && handler.route && matches(handler.route, path))
   return [...new Set(matching.map(handler => handler.method!.toUpperCase()))].sort()
 }

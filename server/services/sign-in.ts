@@ -3,9 +3,10 @@ import type { PersonId } from '../../shared/types/ids'
 import type { Db } from '../db/client'
 import { findActivePerson, findPersonByEmail, updatePasswordHash, type Person } from '../db/queries/people'
 import {
-  countTries, deleteOldTries, deleteTries, findOpenSession, insertSession, insertTry, knowsAddress, updateSessionEnded, updateSessionSeen,
+  countTries, deleteExpiredSessions, deleteOldTries, deleteTries, findOpenSession, insertSession, insertTry, knowsAddress, updateSessionEnded, updateSessionSeen,
 } from '../db/queries/sessions'
-import { hashPassword, isPassword, isWeakHash, NOBODYS_HASH } from './passwords'
+import { closeStreamsOf } from './open-streams'
+import { hashPassword, isHashingBusy, isPassword, isWeakHash, NOBODYS_HASH } from './passwords'
 
 const MINUTE = 60_000
 const DAY = 24 * 60 * MINUTE
@@ -24,7 +25,7 @@ const sha256 = (text: string) => createHash('sha256').update(text).digest('base6
 
 export type SignIn
   = | { outcome: 'signed-in', person: Person, sessionId: string }
-    | { outcome: 'refused' }
+    | { outcome: 'refused' | 'busy' }
     | { outcome: 'too-many-tries', retryAfterSeconds: number }
 
 /**
@@ -40,6 +41,7 @@ export async function signIn(db: Db, now: Date, attempt: { email: string, passwo
   const person = findPersonByEmail(db, email)
   const wait = secondsToWait(db, now, accountHash, attempt.address, person?.id)
   if (wait > 0) return { outcome: 'too-many-tries', retryAfterSeconds: wait }
+  if (isHashingBusy()) return { outcome: 'busy' }
   // Counted before it is known to fail, so that many at once can't slip past the count.
   insertTry(db, { accountHash, address: attempt.address, at: now })
   deleteOldTries(db, new Date(now.getTime() - DAY))
@@ -49,6 +51,7 @@ export async function signIn(db: Db, now: Date, attempt: { email: string, passwo
   const sessionId = randomBytes(32).toString('base64url')
   db.transaction((tx) => {
     deleteTries(tx, accountHash, attempt.address)
+    deleteExpiredSessions(tx, now)
     insertSession(tx, {
       idHash: sha256(sessionId), personId: person.id, address: attempt.address, createdAt: now, lastSeenAt: now, expiresAt: new Date(now.getTime() + ABSOLUTE_MS),
     })
@@ -81,4 +84,5 @@ export function personOfSession(db: Db, now: Date, sessionId: string): Person | 
 
 export function signOut(db: Db, now: Date, sessionId: string): void {
   updateSessionEnded(db, sha256(sessionId), now)
+  closeStreamsOf(sessionId)
 }

@@ -14,12 +14,13 @@ const KEEP_CLOCK_MS = 20_000
 /**
  * Puts settings, database and clock in place.
  *
+ * @param built - true in a built server
  * @returns what stops them again
  * @throws {Error} in plain words, when a setting, the database or what lies in it doesn't allow a start
  */
-export function startApp(env: Record<string, string | undefined>, migrations: Migration[]): () => void {
+export function startApp(env: Record<string, string | undefined>, migrations: Migration[], built: boolean): () => void {
   const shared = globalThis as Record<symbol, unknown>
-  const settings = readSettings(env, shared[FAKES] === true)
+  const settings = readSettings(env, { fakesLoaded: shared[FAKES] === true, built })
   const { db, sqlite, close } = openDatabase(join(settings.dataDir, 'sillion.db'), migrations)
   if (settings.production && countDemoPeople(db) > 0) {
     close()

@@ -1,8 +1,12 @@
+import type { IncomingMessage } from 'node:http'
 import { getHeader, setResponseHeader, type H3Event } from 'h3'
 import type { z } from 'zod'
 import { fail } from './fail'
 
 const MOST_BYTES = 64 * 1024
+/** A phone at the field's edge needs seconds for 64 kB; nobody needs more. */
+const MOST_MS = 20_000
+const TOO_LARGE = `The data is too large: ${MOST_BYTES / 1024} kB at most.`
 /** Keys that would reach into an object's prototype. */
 const UNSAFE_KEYS = new Set(['__proto__', 'constructor', 'prototype'])
 
@@ -22,34 +26,52 @@ export async function readBodyAs<Schema extends z.ZodType>(event: H3Event, schem
   fail(400, 'wrong-shape', field ? `${field}: ${issue.message}` : issue.message, field)
 }
 
-function readText(event: H3Event): Promise<string> {
+async function readText(event: H3Event): Promise<string> {
   const request = event.node.req
-  if (Number(getHeader(event, 'content-length') ?? 0) > MOST_BYTES) tooLarge(event)
-  return new Promise((resolve, reject) => {
+  if (Number(getHeader(event, 'content-length') ?? 0) > MOST_BYTES) refuseUnread(event, 413, 'too-large', TOO_LARGE)
+  const read = await readBytes(request)
+  if (read === 'too-large') refuseUnread(event, 413, 'too-large', TOO_LARGE)
+  if (read === 'cut-off') fail(400, 'cut-off', 'The data broke off. Send it again.')
+  if (read === 'too-slow') refuseUnread(event, 408, 'too-slow', 'The data did not arrive in time. Send it again.')
+  try {
+    return new TextDecoder('utf-8', { fatal: true }).decode(read)
+  }
+  catch {
+    fail(400, 'not-json', 'The data is not valid JSON: it is not UTF-8.')
+  }
+}
+
+/** Reads no further than is allowed, in bytes and in time; what is left stays unread. */
+function readBytes(request: IncomingMessage): Promise<Buffer | 'too-large' | 'too-slow' | 'cut-off'> {
+  return new Promise((resolve) => {
     const chunks: Buffer[] = []
     let bytes = 0
-    request.on('data', (chunk: Buffer) => {
+    const timer = setTimeout(finish, MOST_MS, 'too-slow')
+    request.on('data', take).on('end', end).on('error', cut).on('close', cut)
+
+    function take(chunk: Buffer): void {
       bytes += chunk.length
-      if (bytes <= MOST_BYTES) chunks.push(chunk)
-      else {
-        request.pause()
-        request.removeAllListeners('data')
-        try {
-          tooLarge(event)
-        }
-        catch (error) {
-          reject(error)
-        }
-      }
-    })
-    request.on('end', () => resolve(Buffer.concat(chunks).toString('utf8')))
-    request.on('error', reject)
+      if (bytes > MOST_BYTES) finish('too-large')
+      else chunks.push(chunk)
+    }
+    function end(): void {
+      finish(Buffer.concat(chunks))
+    }
+    function cut(): void {
+      finish('cut-off')
+    }
+    function finish(outcome: Buffer | 'too-large' | 'too-slow' | 'cut-off'): void {
+      clearTimeout(timer)
+      request.off('data', take).off('end', end).off('error', cut).off('close', cut).pause()
+      resolve(outcome)
+    }
   })
 }
 
-function tooLarge(event: H3Event): never {
+/** What is still on its way would be taken for the next request, so the connection ends with the answer. */
+function refuseUnread(event: H3Event, status: number, code: string, message: string): never {
   setResponseHeader(event, 'connection', 'close')
-  fail(413, 'too-large', `The data is too large: ${MOST_BYTES / 1024} kB at most.`)
+  fail(status, code, message)
 }
 
 function parse(text: string): unknown {

@@ -6,9 +6,10 @@ import { startDemoServer, type DemoServer } from './demo-server'
 
 /**
  * Who may call what. Every route file under server/api must stand here: a route that doesn't fails the test.
- * `anyone` needs no sign-in; a permission needs a role that has it.
+ * `anyone` needs no sign-in, `signed in` nothing more than one; a permission needs a role that has it.
  */
-const POLICY: Record<string, 'anyone' | Permission> = {
+const POLICY: Record<string, 'anyone' | 'signed in' | Permission> = {
+  'GET /api/farms': 'signed in',
   'GET /api/auth/me': 'anyone',
   'POST /api/auth/sign-in': 'anyone',
   'POST /api/auth/sign-out': 'anyone',
@@ -69,7 +70,7 @@ describe('access', () => {
     expect(routesUnder('server/api').sort()).toEqual(Object.keys(POLICY).sort())
   })
 
-  const guarded = Object.entries(POLICY).filter((entry): entry is [string, Permission] => entry[1] !== 'anyone')
+  const guarded = Object.entries(POLICY).filter((entry): entry is [string, Permission] => entry[1] !== 'anyone' && entry[1] !== 'signed in')
   describe.each(guarded)('%s', (route, permission) => {
     const [method, path] = route.split(' ') as [string, string]
 
@@ -95,6 +96,14 @@ describe('access', () => {
     it('lets nobody of the first farm but the agronomist into the second', async () => {
       for (const role of ['owner', 'operator', 'crew'] as const) expect((await send(method, onFarm(path, 'cairn-flats'), cookies[role])).status).toBe(404)
     })
+  })
+
+  it('lists to each person their own farms, and to nobody any', async () => {
+    expect((await send('GET', '/api/farms')).status).toBe(401)
+    const farms = async (who: Role | 'stranger') => (JSON.parse((await send('GET', '/api/farms', cookies[who])).text) as { farms: { slug: string, role: Role }[] }).farms.map(({ slug, role }) => [slug, role])
+    expect(await farms('owner')).toEqual([['brindle-marsh', 'owner']])
+    expect(await farms('agronomist')).toEqual([['brindle-marsh', 'agronomist'], ['cairn-flats', 'agronomist']])
+    expect(await farms('stranger')).toEqual([['cairn-flats', 'owner']])
   })
 
   const pass = { pass: 'dig', areaAc: 10, startedAt: '2025-05-06T08:00:00Z', endedAt: '2025-05-06T09:00:00Z' }

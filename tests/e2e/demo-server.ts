@@ -18,6 +18,8 @@ export interface DemoServer {
   trouble: (mode: string | null) => void
   /** What the server has printed so far. */
   log: () => string
+  /** Asks the server to end, and tells with which code it did; its data stay until `stop`. */
+  end: () => Promise<number | null>
   stop: () => Promise<void>
 }
 
@@ -41,15 +43,21 @@ export async function startDemoServer(settings: Record<string, string> = {}): Pr
   server.stderr.on('data', chunk => printed += chunk)
   await untilReady(address, server, () => printed)
   const { password } = JSON.parse(readFileSync(join(dataDir, 'sign-ins.json'), 'utf8')) as { password: string }
+  const end = async () => {
+    if (server.exitCode !== null) return server.exitCode
+    server.kill('SIGTERM')
+    await once(server, 'exit')
+    return server.exitCode
+  }
   return {
     address,
     dataDir,
     password,
     trouble: mode => writeFileSync(troubleFile, mode ?? ''),
     log: () => printed,
+    end,
     async stop() {
-      server.kill('SIGTERM')
-      if (server.exitCode === null) await once(server, 'exit')
+      await end()
       rmSync(dataDir, { recursive: true, force: true })
     },
   }

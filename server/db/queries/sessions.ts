@@ -20,6 +20,11 @@ export function updateSessionEnded(db: DbOrTransaction, idHash: string, endedAt:
   db.update(sessions).set({ endedAt }).where(and(eq(sessions.idHash, idHash), isNull(sessions.endedAt))).run()
 }
 
+/** Sessions that nobody could open any more. */
+export function deleteExpiredSessions(db: DbOrTransaction, now: Date): void {
+  db.delete(sessions).where(lt(sessions.expiresAt, now)).run()
+}
+
 /** True when the person has signed in from this address before. */
 export function knowsAddress(db: DbOrTransaction, personId: PersonId, address: string): boolean {
   return db.select({ n: count() }).from(sessions).where(and(eq(sessions.personId, personId), eq(sessions.address, address))).get()!.n > 0

@@ -1,4 +1,4 @@
-import { chmodSync, mkdtempSync, writeFileSync } from 'node:fs'
+import { chmodSync, closeSync, copyFileSync, mkdtempSync, openSync, writeFileSync, writeSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import { afterEach, beforeEach, describe, expect, it } from 'vitest'
@@ -51,6 +51,24 @@ describe('openDatabase', () => {
     const file = join(mkdtempSync(join(tmpdir(), 'sillion-db-')), 'sillion.db')
     writeFileSync(file, 'not a database at all, but long enough to be read as one'.repeat(100))
     expect(() => openDatabase(file, readMigrations())).toThrow(/can't be (opened|brought up to date)/)
+  })
+
+  it('refuses a database with a broken page, and says what to do', () => {
+    seedFarm(temporary.db, 'a')
+    temporary.sqlite.pragma('wal_checkpoint(TRUNCATE)')
+    const file = join(temporary.folder, 'broken.db')
+    copyFileSync(temporary.file, file)
+    const pageBytes = temporary.sqlite.pragma('page_size', { simple: true }) as number
+    const handle = openSync(file, 'r+')
+    for (let page = 2; page < 12; page++) writeSync(handle, Buffer.alloc(pageBytes / 2, 0xA5), 0, pageBytes / 2, page * pageBytes)
+    closeSync(handle)
+    expect(() => openDatabase(file, readMigrations())).toThrow(/broken\.db is damaged.*Put back a copy/)
+  })
+
+  it('refuses a database whose tables came without the note that says so', () => {
+    temporary.sqlite.exec('delete from migrations')
+    expect(() => openDatabase(temporary.file, readMigrations())).toThrow(/can't be brought up to date.*already exists.*Nothing was changed/)
+    expect(temporary.sqlite.prepare('select count(*) from migrations').pluck().get()).toBe(0)
   })
 
   it('refuses a folder that can’t be made', () => {

@@ -28,7 +28,7 @@ describe('jobs', () => {
     temporary = temporaryDatabase()
     const machine = { now: () => new Date(0) }
     const demoClock = createDemoClock(NOW, machine)
-    app = { db: temporary.db, sqlite: temporary.sqlite, clock: demoClock, demoClock, settings: readSettings({ NUXT_SESSION_PASSWORD: 'x'.repeat(40) }, false) }
+    app = { db: temporary.db, sqlite: temporary.sqlite, clock: demoClock, demoClock, settings: readSettings({ NUXT_SESSION_PASSWORD: 'x'.repeat(40) }, { fakesLoaded: false, built: false }) }
     ran.length = 0
     fails = false
   })
@@ -70,6 +70,21 @@ describe('jobs', () => {
     app.demoClock!.moveTo(new Date(NOW.getTime() + 61_000))
     await runDueJobs(app)
     expect(ran.map(([name]) => name)).toContain('one')
+  })
+
+  it('run once when the tick meets a move of the clock', async () => {
+    await Promise.all([runJobsUntil(app, new Date(NOW.getTime() + 15 * 60_000)), runDueJobs(app), runDueJobs(app)])
+    expect(ran).toEqual([['one', '10:00'], ['two', '10:00'], ['two', '10:10']])
+  })
+
+  it('are taken over from a killed server when its lease has run out, also while the clock is moved on', async () => {
+    claimJob(app.db, 'one', 'a killed server', NOW, new Date(NOW.getTime() + 300_000))
+    await runJobsUntil(app, new Date(NOW.getTime() + 8 * 60_000))
+    expect(ran).toEqual([['two', '10:00'], ['one', '10:05']])
+  })
+
+  it('leave the clock to a server that has one', async () => {
+    await expect(runJobsUntil({ ...app, demoClock: null }, NOW)).rejects.toThrow('Only the demo')
   })
 
   it('never move a clock back', () => {

@@ -1,9 +1,17 @@
+import { scrypt } from 'node:crypto'
 import { afterEach, beforeEach, describe, expect, it } from 'vitest'
+import { openDatabase } from '../../../server/db/client'
+import { readMigrations } from '../../../server/db/migrations-module'
 import { people } from '../../../server/db/schema'
 import { hashPassword, isPassword, isWeakHash, NOBODYS_HASH, passwordProblem } from '../../../server/services/passwords'
 import { personOfSession, signIn, signOut } from '../../../server/services/sign-in'
 import { NOW, PASSWORD, seedFarm, seedPerson, temporaryDatabase, type TemporaryDatabase } from '../temporary-database'
 
+const weakHash = async (password: string) => {
+  const salt = Buffer.alloc(16, 1)
+  const key = await new Promise<Buffer>((resolve, reject) => scrypt(password, salt, 32, { N: 1024, r: 8, p: 1 }, (error, found) => error ? reject(error) : resolve(found)))
+  return `scrypt$1024$8$1$${salt.toString('base64url')}$${key.toString('base64url')}`
+}
 const later = (minutes: number) => new Date(NOW.getTime() + minutes * 60_000)
 
 describe('signIn', () => {
@@ -74,6 +82,41 @@ describe('signIn', () => {
   it('stops an address after fifty tries on any accounts', async () => {
     for (let i = 0; i < 50; i++) temporary.sqlite.prepare('insert into sign_in_tries (account_hash, address, at) values (?, \'10.0.0.9\', ?)').run(`account ${i}`, NOW.getTime())
     expect((await attempt(PASSWORD, '10.0.0.9')).outcome).toBe('too-many-tries')
+  })
+
+  it('remembers the tries through a restart', async () => {
+    for (let i = 0; i < 10; i++) await attempt('wrong')
+    const again = openDatabase(temporary.file, readMigrations())
+    expect(await signIn(again.db, later(1), { email: 'owner@farm.example', password: PASSWORD, address: '10.0.0.1' })).toEqual({ outcome: 'too-many-tries', retryAfterSeconds: 840 })
+    again.close()
+  })
+
+  it('makes a weak hash strong when the password was right', async () => {
+    const strong = temporary.sqlite.prepare('select password_hash from people').pluck().get() as string
+    const weak = await weakHash(PASSWORD)
+    temporary.db.update(people).set({ passwordHash: weak }).run()
+    expect((await attempt('wrong')).outcome).toBe('refused')
+    expect(temporary.sqlite.prepare('select password_hash from people').pluck().get()).toBe(weak)
+    expect((await attempt(PASSWORD)).outcome).toBe('signed-in')
+    const now = temporary.sqlite.prepare('select password_hash from people').pluck().get() as string
+    expect(now.split('$').slice(0, 4)).toEqual(strong.split('$').slice(0, 4))
+    expect((await attempt(PASSWORD)).outcome).toBe('signed-in')
+  })
+
+  it('turns people away before they would wait for long, and counts no try against them', async () => {
+    const email = (i: number) => `person-${i}@farm.example`
+    const results = await Promise.all(Array.from({ length: 25 }, (_, i) => attempt('wrong', `10.3.0.${i}`, NOW, email(i))))
+    const outcomes = results.map(result => result.outcome)
+    expect(outcomes.filter(outcome => outcome === 'refused')).toHaveLength(20)
+    expect(outcomes.slice(20)).toEqual(['busy', 'busy', 'busy', 'busy', 'busy'])
+    expect(temporary.sqlite.prepare('select count(*) from sign_in_tries').pluck().get()).toBe(20)
+    expect((await attempt(PASSWORD)).outcome).toBe('signed-in')
+  })
+
+  it('forgets sessions that are over', async () => {
+    await session()
+    await attempt(PASSWORD, '10.0.0.1', later(91 * 1440))
+    expect(temporary.sqlite.prepare('select count(*) from sessions').pluck().get()).toBe(1)
   })
 
   it('stops guesses from a hundred addresses, but not the person’s own', async () => {

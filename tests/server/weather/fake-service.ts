@@ -9,7 +9,7 @@ export function fakeService() {
   let now = new Date('2025-05-06T10:00:00Z')
   let calls = 0
   const slept: number[] = []
-  const settings = readSettings({ NUXT_SESSION_PASSWORD: 'x'.repeat(40) }, false).weather
+  const settings = readSettings({ NUXT_SESSION_PASSWORD: 'x'.repeat(40) }, { fakesLoaded: false, built: false }).weather
   server.events.on('request:start', () => calls++)
   return {
     start: () => server.listen({ onUnhandledRequest: 'error' }),
