@@ -41,7 +41,7 @@ function seedFarm(tx: Transaction, farm: DemoFarm, passwordHash: string): void {
   const { slug, name, zone, units, latitude, longitude } = farm
   tx.insert(schema.farms).values({ id: farmId, slug, name, zone, units, latitude, longitude, invented: true, createdAt: DEMO_START }).run()
   for (const { email, name: person, role } of farm.people) {
-    const id = email as string as PersonId
+    const id = `person-${person.toLowerCase()}` as PersonId
     tx.insert(schema.people).values({ id, email, name: person, passwordHash, demo: true, createdAt: DEMO_START }).onConflictDoNothing().run()
     tx.insert(schema.memberships).values({ farmId, personId: id, role, createdAt: DEMO_START }).run()
   }
@@ -50,7 +50,7 @@ function seedFarm(tx: Transaction, farm: DemoFarm, passwordHash: string): void {
   }
   for (const [key, { chain: _, ...crop }] of Object.entries(farm.crops)) {
     const { minimumSoilC, plantingTable } = CROPS[crop.kind]
-    tx.insert(schema.crops).values({ id: idOf<CropId>(farm, key), farmId, ...crop, minimumSoilC, plantingTable }).run()
+    tx.insert(schema.crops).values({ id: idOf<CropId>(farm, key), farmId, minimumSoilC, plantingTable, ...crop }).run()
   }
   for (const field of farm.fields) seedField(tx, farm, field)
   for (const { at, down, ...machine } of farm.machines) {

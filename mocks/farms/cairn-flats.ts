@@ -17,8 +17,8 @@ export const cairnFlats: DemoFarm = {
     'loam': { name: 'Loam', sandPct: 40, clayPct: 20, organicMatterPct: 3 },
   },
   crops: {
-    wheat: { name: 'Wheat', kind: 'wheat', goalYieldBuPerAc: 52, priceUsdPerBu: 6.1, chain: ['dig', 'plant', 'spray'] },
-    oats: { name: 'Oats', kind: 'oats', goalYieldBuPerAc: 88, priceUsdPerBu: 3.4, chain: ['dig', 'plant'] },
+    wheat: { name: 'Wheat', kind: 'wheat', plantingTable: 'wheat-canada', goalYieldBuPerAc: 52, priceUsdPerBu: 6.1, chain: ['dig', 'plant', 'spray'] },
+    oats: { name: 'Oats', kind: 'oats', plantingTable: 'oats-canada', goalYieldBuPerAc: 88, priceUsdPerBu: 3.4, chain: ['dig', 'plant'] },
   },
   machines: [
     { name: 'Otter', pass: 'dig', driver: 'Ulla', widthFt: 50, speedMph: 6, fieldEfficiency: 0.8, fromHour: 7, toHour: 21, foldMinutes: 12, at: 'Cairn' },

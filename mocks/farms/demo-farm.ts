@@ -14,6 +14,8 @@ export interface DemoFarm {
   crops: Record<string, {
     name: string
     kind: 'corn' | 'soybean' | 'wheat' | 'oats'
+    /** key of a planting table; absent: the crop's own */
+    plantingTable?: string
     goalYieldBuPerAc: number
     priceUsdPerBu: number
     /** which of the five passes fields of this crop get */

@@ -3,9 +3,11 @@ import type { z } from 'zod'
 import type { NewPassRecord } from '../../shared/schemas/passes'
 import type { FarmId, FieldId, MachineId, PassRecordId, PersonId } from '../../shared/types/ids'
 import type { DbOrTransaction } from '../db/client'
+import type { Farm } from '../db/queries/farms'
 import { findField } from '../db/queries/fields'
-import { findMachine } from '../db/queries/machines'
-import { insertPassRecord, sumPassAcres, type PassRecordRow } from '../db/queries/pass-records'
+import { findMachine, updateMachinePlace } from '../db/queries/machines'
+import { findLastWorkEnd, insertPassRecord, sumPassAcres, type PassRecordRow } from '../db/queries/pass-records'
+import { seasonStart } from './season'
 
 export type Logged
   = | { outcome: 'logged', record: PassRecordRow, doneBeforeAc: number }
@@ -16,18 +18,25 @@ export type Logged
 const OVERSHOOT_SHARE = 0.05
 
 /** Keeps acres that were worked in a field. Nothing is kept unless the outcome is `logged`. */
-export function logPass(tx: DbOrTransaction, farmId: FarmId, fieldId: string, personId: PersonId, now: Date, entry: z.output<typeof NewPassRecord>): Logged {
+export function logPass(tx: DbOrTransaction, { id: farmId, zone }: Pick<Farm, 'id' | 'zone'>, fieldId: string, personId: PersonId, now: Date, entry: z.output<typeof NewPassRecord>): Logged {
   const field = findField(tx, farmId, fieldId as FieldId)
   if (!field) return { outcome: 'no-field' }
   if (!field.chain.includes(entry.pass)) return { outcome: 'not-in-chain' }
   if (entry.machineId !== null && !findMachine(tx, farmId, entry.machineId as MachineId)) return { outcome: 'no-machine' }
   if (Date.parse(entry.endedAt) > now.getTime() + 60_000) return { outcome: 'in-the-future' }
-  const doneBeforeAc = sumPassAcres(tx, farmId, field.id, entry.pass, new Date(Date.UTC(now.getUTCFullYear(), 0, 1)))
+  const doneBeforeAc = sumPassAcres(tx, farmId, field.id, entry.pass, seasonStart(now, zone))
   const leftAc = field.areaAc - doneBeforeAc
   if (entry.areaAc > leftAc + OVERSHOOT_SHARE * field.areaAc) return { outcome: 'too-many-acres', leftAc }
+  if (entry.machineId !== null) moveMachine(tx, farmId, entry.machineId as MachineId, field.id, new Date(entry.endedAt))
   const record = insertPassRecord(tx, {
     id: randomUUID() as string as PassRecordId, farmId, fieldId: field.id, machineId: entry.machineId as MachineId | null, pass: entry.pass, areaAc: entry.areaAc,
     startedAt: new Date(entry.startedAt), endedAt: new Date(entry.endedAt), note: entry.note, enteredBy: personId, enteredAt: now,
   })
   return { outcome: 'logged', record, doneBeforeAc }
+}
+
+/** A machine stands where it worked last; a phone that was offline may tell of earlier work later. */
+function moveMachine(tx: DbOrTransaction, farmId: FarmId, machineId: MachineId, fieldId: FieldId, endedAt: Date): void {
+  const lastEnd = findLastWorkEnd(tx, farmId, machineId)
+  if (!lastEnd || lastEnd <= endedAt) updateMachinePlace(tx, farmId, machineId, fieldId)
 }

@@ -1,8 +1,12 @@
-import { isReady } from '../../services/health'
+import { whyNotReady } from '../../services/health'
+import { log } from '../../services/log'
 
-/** The database can be written and every place has had a forecast once. Says no more to whoever asks. */
+/** The database can be written, the disk has room, and every place has had a forecast. Says no more to whoever asks. */
 export default defineEventHandler((event) => {
-  const { db, clock } = allowAnyone(event)
-  if (!isReady(db, clock.now())) fail(503, 'not-ready', 'Not ready yet.')
+  const reason = whyNotReady(allowAnyone(event))
+  if (reason) {
+    log('warn', 'Not ready.', { reason })
+    fail(503, 'not-ready', 'Not ready yet.')
+  }
   return { ready: true }
 })

@@ -1,6 +1,6 @@
 import { and, eq, gte, max, sum } from 'drizzle-orm'
 import type { Pass } from '../../../shared/agronomy/ground'
-import type { FarmId, FieldId } from '../../../shared/types/ids'
+import type { FarmId, FieldId, MachineId } from '../../../shared/types/ids'
 import type { DbOrTransaction } from '../client'
 import { passRecords } from '../schema'
 
@@ -28,6 +28,14 @@ export function sumPassAcres(db: DbOrTransaction, farmId: FarmId, fieldId: Field
     .where(and(eq(passRecords.farmId, farmId), eq(passRecords.fieldId, fieldId), eq(passRecords.pass, pass), gte(passRecords.endedAt, since)))
     .get()
   return total?.areaAc ?? 0
+}
+
+/** When the machine's latest work ended; null: it has no record. */
+export function findLastWorkEnd(db: DbOrTransaction, farmId: FarmId, machineId: MachineId): Date | null {
+  const last = db.select({ endedAt: max(passRecords.endedAt) }).from(passRecords)
+    .where(and(eq(passRecords.farmId, farmId), eq(passRecords.machineId, machineId)))
+    .get()
+  return last?.endedAt ?? null
 }
 
 export function insertPassRecord(db: DbOrTransaction, record: typeof passRecords.$inferInsert): PassRecordRow {

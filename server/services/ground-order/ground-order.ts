@@ -1,4 +1,3 @@
-import { TZDate } from '@date-fns/tz'
 import { greatCircleKm } from '../../../shared/agronomy/machine/road'
 import type { FarmId } from '../../../shared/types/ids'
 import type { ForecastSummary, GroundOrder } from '../../../shared/types/ground-order'
@@ -11,6 +10,7 @@ import { listPassTotals } from '../../db/queries/pass-records'
 import { listPlacesOfFarm, type PlaceRow } from '../../db/queries/places'
 import { listSoils } from '../../db/queries/soils'
 import { findNewestPull } from '../../db/queries/weather-pulls'
+import { seasonStart } from '../season'
 import { forecastSummary } from '../weather/forecast-summary'
 import { freshness } from '../weather/freshness'
 import { weatherFor } from '../weather/weather-for'
@@ -81,10 +81,4 @@ function placesWanted(places: readonly PlaceRow[], farm: Farm, seasons: readonly
   const open = new Set(seasons.filter(season => !isPlanted(season)).map(({ field }) => field.placeId))
   const nearest = places.toSorted((a, b) => greatCircleKm(farm, a) - greatCircleKm(farm, b))[0]
   return places.filter(place => open.has(place.id) || place.id === nearest?.id)
-}
-
-/** Work of the season counts from the first of January at the farm. */
-export function seasonStart(now: Date, zone: string): Date {
-  const year = new TZDate(now.getTime(), zone).getFullYear()
-  return new Date(new TZDate(year, 0, 1, zone).getTime())
 }

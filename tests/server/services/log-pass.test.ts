@@ -1,6 +1,7 @@
 import { afterEach, beforeEach, describe, expect, it } from 'vitest'
 import { NewPassRecord } from '../../../shared/schemas/passes'
 import type { FarmId, MachineId, PersonId } from '../../../shared/types/ids'
+import { findMachine } from '../../../server/db/queries/machines'
 import { sumPassAcres } from '../../../server/db/queries/pass-records'
 import { machines } from '../../../server/db/schema'
 import { logPass } from '../../../server/services/log-pass'
@@ -19,7 +20,7 @@ describe('logPass', () => {
   afterEach(() => temporary.close())
 
   const entry = (over: object = {}) => NewPassRecord.parse({ pass: 'plant', areaAc: 40, machineId: 'a-jay', startedAt: '2025-05-06T08:00:00Z', endedAt: '2025-05-06T09:30:00Z', ...over })
-  const log = (over: object = {}, fieldId = 'a-0', farm = farmId) => logPass(temporary.db, farm, fieldId, person, NOW, entry(over))
+  const log = (over: object = {}, fieldId = 'a-0', farm = farmId) => logPass(temporary.db, { id: farm, zone: 'America/Chicago' }, fieldId, person, NOW, entry(over))
   const done = (fieldId = 'a-0') => sumPassAcres(temporary.db, farmId, fieldId as never, 'plant', new Date('2025-01-01T00:00:00Z'))
 
   it('keeps acres, machine, times and who wrote them down', () => {
@@ -30,6 +31,23 @@ describe('logPass', () => {
 
   it('takes a time in any offset', () => {
     expect(log({ endedAt: '2025-05-06T04:30:00-05:00' })).toMatchObject({ outcome: 'logged', record: { endedAt: new Date('2025-05-06T09:30:00Z') } })
+  })
+
+  it('leaves the machine where it worked last, whatever order the news comes in', () => {
+    const at = () => findMachine(temporary.db, farmId, 'a-jay' as MachineId)!.atFieldId
+    log({}, 'a-1')
+    expect(at()).toBe('a-1')
+    log({ startedAt: '2025-05-06T06:00:00Z', endedAt: '2025-05-06T07:00:00Z' }, 'a-0')
+    expect(at()).toBe('a-1')
+    log({ startedAt: '2025-05-06T09:30:00Z', endedAt: '2025-05-06T09:50:00Z' }, 'a-0')
+    expect(at()).toBe('a-0')
+  })
+
+  it('counts the acres of the season at the farm, not of the year in Greenwich', () => {
+    const newYear = new Date('2026-01-01T03:00:00Z') // still 2025 at the farm
+    const logAt = (over: object) => logPass(temporary.db, { id: farmId, zone: 'America/Chicago' }, 'a-0', person, newYear, entry(over))
+    expect(logAt({ areaAc: 60 })).toMatchObject({ outcome: 'logged', doneBeforeAc: 0 })
+    expect(logAt({ areaAc: 60 })).toMatchObject({ outcome: 'too-many-acres', leftAc: 40 })
   })
 
   it.each([

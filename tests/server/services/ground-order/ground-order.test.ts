@@ -4,7 +4,7 @@ import { setTrouble } from '../../../../mocks/trouble'
 import { findFarm, updateRevision } from '../../../../server/db/queries/farms'
 import { insertPassRecord } from '../../../../server/db/queries/pass-records'
 import { crops, fields, machines, soils } from '../../../../server/db/schema'
-import { groundOrder, seasonStart } from '../../../../server/services/ground-order/ground-order'
+import { groundOrder } from '../../../../server/services/ground-order/ground-order'
 import { pullWeather } from '../../../../server/services/weather/pull-weather'
 import type { CropId, FarmId, FieldId, MachineId, PassRecordId, SoilId } from '../../../../shared/types/ids'
 import { NOW, seedFarm, temporaryDatabase, type TemporaryDatabase } from '../../temporary-database'
@@ -113,13 +113,6 @@ describe('groundOrder', () => {
     seedWholeFarm(twin, 'a')
     expect(groundOrder(twin.db, findFarm(twin.db, farmId)!, NOW).forecast.status).toBe('none')
     twin.close()
-  })
-})
-
-describe('seasonStart', () => {
-  it('is the first of January at the farm', () => {
-    expect(seasonStart(new Date('2025-05-06T10:00:00Z'), 'America/Chicago')).toEqual(new Date('2025-01-01T06:00:00Z'))
-    expect(seasonStart(new Date('2026-01-01T03:00:00Z'), 'America/Chicago')).toEqual(new Date('2025-01-01T06:00:00Z'))
   })
 })
 

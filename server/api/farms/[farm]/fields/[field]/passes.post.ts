@@ -6,7 +6,7 @@ export default defineEventHandler(async (event) => {
   const entry = await readBodyAs(event, NewPassRecord)
   const { farm, person, now } = context
   return answerWrite(event, context, entry, (tx) => {
-    const logged = logPass(tx, farm.id, getRouterParam(event, 'field') ?? '', person.id, now, entry)
+    const logged = logPass(tx, farm, getRouterParam(event, 'field') ?? '', person.id, now, entry)
     switch (logged.outcome) {
       case 'no-field': return fail(404, 'not-found', 'There is no such field.')
       case 'no-machine': return fail(404, 'not-found', 'There is no such machine.', 'machineId')
