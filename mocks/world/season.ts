@@ -32,6 +32,53 @@ const SOLAR_CONSTANT_WM2 = 1361
 /** Keys of the separate noises. */
 const KEY = { warm: 11, cloud: 12, wind: 13, direction: 14, amount: 15, timing: 16, place: 17, dew: 18 }
 
+/** The noise of a time in a scenario. It is the same at every place, so it is drawn once for all of them. */
+interface Noises {
+  warm: number
+  cloud: number
+  wind: number
+  direction: number
+  dew: number
+  gust: number
+  warmError: number
+  cloudError: number
+  windError: number
+}
+/** What a scenario has drawn so far: noises by time, and how each front differs. */
+interface Draws { noises: Map<number, Noises>, fronts: Map<number, { timing: number, amount: number }> }
+const drawn = new Map<string, Draws>()
+/** Runs of some cycles; an older cycle is hardly asked for again. */
+const MOST_DRAWN = 160
+
+function drawsOf({ madeAt, run }: Scenario): Draws {
+  const key = `${madeAt} ${run}`
+  const known = drawn.get(key)
+  if (known) return known
+  if (drawn.size >= MOST_DRAWN) drawn.delete(drawn.keys().next().value!)
+  const draws: Draws = { noises: new Map(), fronts: new Map() }
+  drawn.set(key, draws)
+  return draws
+}
+
+function noisesAt(time: number, scenario: Scenario): Noises {
+  const { noises } = drawsOf(scenario)
+  const known = noises.get(time)
+  if (known) return known
+  const made: Noises = {
+    warm: wandering(time, 60, KEY.warm),
+    cloud: wandering(time, 16, KEY.cloud),
+    wind: wandering(time, 9, KEY.wind),
+    direction: wandering(time, 40, KEY.direction),
+    dew: wandering(time, 20, KEY.dew),
+    gust: normal(Math.floor(time), KEY.wind, 5),
+    warmError: error(time, scenario, KEY.warm),
+    cloudError: error(time, scenario, KEY.cloud),
+    windError: error(time, scenario, KEY.wind),
+  }
+  noises.set(time, made)
+  return made
+}
+
 /** mm that fall between two instants (Unix hours) at a place. */
 export function rainBetween(from: number, to: number, place: Place, scenario: Scenario): number {
   let mm = 0
@@ -44,22 +91,22 @@ export function rainBetween(from: number, to: number, place: Place, scenario: Sc
 
 /** Weather at an instant (Unix hours) at a place. */
 export function momentAt(time: number, place: Place, scenario: Scenario): Moment {
-  const near = frontsNear(time, place, 60).map(front => ({ front, ...believed(front, place, scenario) }))
-  const since = near.map(({ front, startsAt }) => ({ front, hours: time - startsAt }))
-  const cloud = cloudAt(time, since, scenario)
+  const noises = noisesAt(time, scenario)
+  const since = frontsNear(time, place, 60).map(front => ({ front, hours: time - believed(front, place, scenario).startsAt }))
+  const cloud = cloudAt(noises, since)
   const altitude = sineOfSun(time, place)
-  const temperatureC = temperatureAt(time, place, cloud, since, scenario)
+  const temperatureC = temperatureAt(time, place, cloud, since, noises)
   const raining = since.some(({ front, hours }) => hours > 0 && hours < front.hours)
-  const depression = Math.max(0.3, (raining ? 0.8 : 6.5) + (raining ? 0 : 2.2) * wandering(time, 20, KEY.dew) * 0.6 + (raining ? 0 : 5) * Math.max(-0.7, swing(time, place)))
+  const depression = Math.max(0.3, (raining ? 0.8 : 6.5) + (raining ? 0 : 2.2) * noises.dew * 0.6 + (raining ? 0 : 5) * Math.max(-0.7, swing(time, place)))
   const dewPointC = temperatureC - depression
-  const { windMs, windFromDeg } = windAt(time, place, since, scenario)
+  const { windMs, windFromDeg } = windAt(time, place, since, noises)
   return {
     temperatureC,
     dewPointC,
     humidityPct: Math.min(100, 100 * vapour(dewPointC) / vapour(temperatureC)),
     cloudPct: 100 * cloud,
     windMs,
-    gustMs: windMs * (1.45 + 0.15 * Math.abs(normal(Math.floor(time), KEY.wind, 5))),
+    gustMs: windMs * (1.45 + 0.15 * Math.abs(noises.gust)),
     windFromDeg,
     // Clear-sky transmission and cloud attenuation in the usual simple forms.
     radiationWm2: altitude <= 0 ? 0 : SOLAR_CONSTANT_WM2 * altitude * 0.76 * (1 - 0.72 * cloud ** 2.2),
@@ -82,16 +129,39 @@ function delayHours(place: Place): number {
  * The truth is one draw around the forecast's middle, each run another of the same spread: so rain comes as often as
  * the runs say.
  */
-function believed(front: Front, place: Place, { madeAt, run }: Scenario): { startsAt: number, total: number } {
+function believed(front: Front, place: Place, scenario: Scenario): { startsAt: number, total: number } {
   const arrives = front.startsAt + delayHours(place)
-  const here = Math.exp(0.1 * wandering(place.latitude * 12, 1, KEY.place, front.id) + 0.1 * wandering(place.longitude * 9, 1, KEY.place, front.id, 1))
-  const lead = arrives - madeAt
-  if (!Number.isFinite(madeAt) || lead < -front.hours) return { startsAt: arrives, total: front.mm * here }
-  const middleError = front.scriptedError ?? wandering(madeAt, 30, KEY.timing, front.id)
-  const startsAt = arrives + timingSpreadHours(lead) * (normal(front.id, run, madeAt, KEY.timing) - middleError)
-  const amountError = wandering(madeAt, 30, KEY.amount, front.id)
-  const total = front.mm * here * Math.exp(amountSpread(lead) * (normal(front.id, run, madeAt, KEY.amount) - amountError))
-  return { startsAt, total }
+  const total = front.mm * shareHere(front, place)
+  const lead = arrives - scenario.madeAt
+  if (!Number.isFinite(scenario.madeAt) || lead < -front.hours) return { startsAt: arrives, total }
+  const { timing, amount } = errorsOf(front, scenario)
+  return { startsAt: arrives + timingSpreadHours(lead) * timing, total: total * Math.exp(amountSpread(lead) * amount) }
+}
+
+/** How a scenario's draw of a front differs from the truth, in standard deviations. */
+function errorsOf(front: Front, scenario: Scenario): { timing: number, amount: number } {
+  const { fronts } = drawsOf(scenario)
+  const known = fronts.get(front.id)
+  if (known) return known
+  const { madeAt, run } = scenario
+  const made = {
+    timing: normal(front.id, run, madeAt, KEY.timing) - (front.scriptedError ?? wandering(madeAt, 30, KEY.timing, front.id)),
+    amount: normal(front.id, run, madeAt, KEY.amount) - wandering(madeAt, 30, KEY.amount, front.id),
+  }
+  fronts.set(front.id, made)
+  return made
+}
+
+const sharesHere = new Map<string, number>()
+
+/** What a place gets of a front, as a share of the front's own amount. */
+function shareHere(front: Front, place: Place): number {
+  const key = `${front.id} ${place.latitude} ${place.longitude}`
+  const known = sharesHere.get(key)
+  if (known !== undefined) return known
+  const made = Math.exp(0.1 * wandering(place.latitude * 12, 1, KEY.place, front.id) + 0.1 * wandering(place.longitude * 9, 1, KEY.place, front.id, 1))
+  sharesHere.set(key, made)
+  return made
 }
 
 /** Share of a front's rain that has fallen after a share of its time: slow, heavy, slow. */
@@ -101,8 +171,8 @@ function shareFallen(x: number): number {
   return x * x * (3 - 2 * x)
 }
 
-function cloudAt(time: number, since: { front: Front, hours: number }[], scenario: Scenario): number {
-  let cloud = 0.35 + 0.22 * wandering(time, 16, KEY.cloud) + error(time, scenario, KEY.cloud) * 0.03
+function cloudAt(noises: Noises, since: { front: Front, hours: number }[]): number {
+  let cloud = 0.35 + 0.22 * noises.cloud + noises.cloudError * 0.03
   for (const { front, hours } of since) {
     const ahead = Math.max(0, 1 + hours / 14)
     const behind = hours < front.hours ? 1 : Math.max(0, 1 - (hours - front.hours) / 12)
@@ -111,18 +181,18 @@ function cloudAt(time: number, since: { front: Front, hours: number }[], scenari
   return Math.min(1, Math.max(0.02, cloud))
 }
 
-function temperatureAt(time: number, place: Place, cloud: number, since: { front: Front, hours: number }[], scenario: Scenario): number {
+function temperatureAt(time: number, place: Place, cloud: number, since: { front: Front, hours: number }[], noises: Noises): number {
   const day = time / 24
   const yearDay = day - Date.UTC(2025, 0, 1) / 86_400_000
   const north = (place.latitude - REFERENCE.latitude) * 0.8
   let celsius = 10.4 - north - 17.5 * Math.cos(2 * Math.PI * (yearDay - 22) / 365)
-  celsius += 2.2 * wandering(time, 60, KEY.warm)
+  celsius += 2.2 * noises.warm
   celsius += 7.2 * (1 - 0.65 * cloud) * swing(time, place)
   for (const { front, hours } of since) {
     if (hours > -18 && hours < 0) celsius += 2 * (1 + hours / 18)
     else if (hours >= 0) celsius -= front.coldBehind * Math.min(1, hours / 4) * Math.exp(-Math.max(0, hours - 20) / 18)
   }
-  return celsius + 0.03 * error(time, scenario, KEY.warm)
+  return celsius + 0.03 * noises.warmError
 }
 
 /** −1 before sunrise to 1 in mid afternoon. */
@@ -132,9 +202,9 @@ function swing(time: number, place: Place): number {
 }
 
 /** South-east wind ahead of a front, north-west behind it. */
-function windAt(time: number, place: Place, since: { front: Front, hours: number }[], scenario: Scenario): { windMs: number, windFromDeg: number } {
-  let speed = 4 + 1.1 * wandering(time, 9, KEY.wind) + 1.3 * swing(time, place) + 0.02 * error(time, scenario, KEY.wind)
-  let direction = 200 + 60 * wandering(time, 40, KEY.direction)
+function windAt(time: number, place: Place, since: { front: Front, hours: number }[], noises: Noises): { windMs: number, windFromDeg: number } {
+  let speed = 4 + 1.1 * noises.wind + 1.3 * swing(time, place) + 0.02 * noises.windError
+  let direction = 200 + 60 * noises.direction
   for (const { front, hours } of since) {
     const turned = 1 / (1 + Math.exp(-(hours - front.hours * 0.55) / 1.5))
     const grip = Math.exp(-(((hours - front.hours / 2) / 22) ** 2))

@@ -1,4 +1,4 @@
-import { momentAt, rainBetween, TRUTH, type Moment, type Place } from './season'
+import { momentAt, rainBetween, TRUTH, type Moment, type Place, type Scenario } from './season'
 
 /** What the invented service would answer: hour labels as the real one has them. */
 
@@ -58,12 +58,27 @@ function hoursOf(place: Place, from: number, hours: number, nowHours: number, ru
   const key = [place.latitude, place.longitude, from, hours, over, cycle, run].join()
   const known = remembered.get(key)
   if (known) return known
-  const made = Array.from({ length: hours }, (_, i) => {
-    const label = from + i
-    const scenario = label <= over ? TRUTH : { madeAt: cycle, run }
-    return { at: momentAt(label, place, scenario), before: momentAt(label - 0.5, place, scenario), rainMm: rainBetween(label - 1, label, place, scenario) }
-  })
+  const believed = { madeAt: cycle, run }
+  const made = Array.from({ length: hours }, (_, i) => from + i <= over ? pastHour(place, from + i) : hourOf(place, from + i, believed))
   if (remembered.size >= MOST_REMEMBERED) remembered.clear()
   remembered.set(key, made)
+  return made
+}
+
+function hourOf(place: Place, label: number, scenario: Scenario): Hour {
+  return { at: momentAt(label, place, scenario), before: momentAt(label - 0.5, place, scenario), rainMm: rainBetween(label - 1, label, place, scenario) }
+}
+
+const past = new Map<string, Hour>()
+const MOST_PAST = 50_000
+
+/** What is over is the same for every run and every later cycle. */
+function pastHour(place: Place, label: number): Hour {
+  const key = [place.latitude, place.longitude, label].join()
+  const known = past.get(key)
+  if (known) return known
+  if (past.size >= MOST_PAST) past.clear()
+  const made = hourOf(place, label, TRUTH)
+  past.set(key, made)
   return made
 }

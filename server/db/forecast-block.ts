@@ -31,6 +31,8 @@ export function unpackBlock<Variable extends WeatherVariable>(data: Buffer, vari
   const steps = new Int16Array(bytes.buffer, bytes.byteOffset, bytes.byteLength / 2)
   return Array.from({ length: runs }, (_, run) => Object.fromEntries(variables.map((variable, v) => {
     const from = (v * runs + run) * hours
-    return [variable, Float64Array.from(steps.subarray(from, from + hours), step => step * RESOLUTION[variable])]
+    const column = new Float64Array(hours)
+    for (let i = 0; i < hours; i++) column[i] = steps[from + i]! * RESOLUTION[variable]
+    return [variable, column]
   })) as Record<Variable, Float64Array>)
 }

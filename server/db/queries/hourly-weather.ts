@@ -1,28 +1,26 @@
-import { and, asc, eq, gte, lt, max, sql } from 'drizzle-orm'
+import { and, asc, eq, getTableColumns, gte, lt, max, sql } from 'drizzle-orm'
 import type { PlaceId } from '../../../shared/types/ids'
 import type { DbOrTransaction } from '../client'
 import { hourlyWeather } from '../schema'
 
-export type HourRow = typeof hourlyWeather.$inferSelect
-
-/** Writes hours that are over; a later analysis of an hour replaces an earlier one. */
+/** Writes hours that are over; a later analysis of an hour replaces an earlier one. One prepared statement: a first pull brings thousands. */
 export function upsertHours(db: DbOrTransaction, hours: (typeof hourlyWeather.$inferInsert)[]): void {
-  const excluded = (column: string) => sql.join([sql.identifier('excluded'), sql.identifier(column)], sql`.`)
-  for (let from = 0; from < hours.length; from += 500) {
-    db.insert(hourlyWeather).values(hours.slice(from, from + 500)).onConflictDoUpdate({
-      target: [hourlyWeather.placeId, hourlyWeather.startsAt, hourlyWeather.source],
-      set: {
-        issuedAt: excluded('issued_at'), fetchedAt: excluded('fetched_at'), rainMm: excluded('rain_mm'), temperatureC: excluded('temperature_c'), humidityPct: excluded('humidity_pct'),
-        windMs: excluded('wind_ms'), windDirectionDeg: excluded('wind_direction_deg'), gustMs: excluded('gust_ms'), radiationWm2: excluded('radiation_wm2'),
-      },
-    }).run()
-  }
+  const { placeId, startsAt, source, ...rest } = getTableColumns(hourlyWeather)
+  const excluded = (name: string) => sql.raw(`excluded.${name.replaceAll(/[A-Z]/g, letter => `_${letter.toLowerCase()}`)}`)
+  const given = Object.fromEntries(Object.keys({ placeId, startsAt, source, ...rest }).map(name => [name, sql.placeholder(name)]))
+  const upsert = db.insert(hourlyWeather)
+    .values(given as unknown as typeof hourlyWeather.$inferInsert)
+    .onConflictDoUpdate({ target: [placeId, startsAt, source], set: Object.fromEntries(Object.keys(rest).map(name => [name, excluded(name)])) })
+    .prepare()
+  for (const hour of hours) upsert.run(hour)
 }
 
-export function listHours(db: DbOrTransaction, placeId: PlaceId, from: Date, to: Date): HourRow[] {
-  return db.select().from(hourlyWeather)
-    .where(and(eq(hourlyWeather.placeId, placeId), gte(hourlyWeather.startsAt, from), lt(hourlyWeather.startsAt, to)))
-    .orderBy(asc(hourlyWeather.startsAt)).all()
+/** What the soil model needs of the hours that are over. */
+export function listHours(db: DbOrTransaction, placeId: PlaceId, from: Date, to: Date) {
+  const { startsAt, rainMm, temperatureC, humidityPct, windMs, radiationWm2 } = hourlyWeather
+  return db.select({ startsAt, rainMm, temperatureC, humidityPct, windMs, radiationWm2 }).from(hourlyWeather)
+    .where(and(eq(hourlyWeather.placeId, placeId), gte(startsAt, from), lt(startsAt, to)))
+    .orderBy(asc(startsAt)).all()
 }
 
 export function findNewestHour(db: DbOrTransaction, placeId: PlaceId): Date | null {

@@ -1,7 +1,7 @@
 import { drySpell, ordinaryDryDay } from '../../../shared/agronomy/plan/dry-spell'
 import { rainOnset } from '../../../shared/agronomy/plan/rain-onset'
 import type { HourlyWeather } from '../../../shared/agronomy/weather/hourly'
-import { hourlyReferenceEt } from '../../../shared/agronomy/weather/reference-evapotranspiration'
+import { hourlyReferenceEt, sunOfHours, type SunHour } from '../../../shared/agronomy/weather/reference-evapotranspiration'
 import type { UsableWeather } from './farm-inputs'
 import { localHours, type LocalHours } from './local-hours'
 
@@ -32,18 +32,19 @@ interface Stretch { weather: HourlyWeather, etoMm: Float64Array, localHour: Uint
  */
 export function placeWork(weather: UsableWeather, point: { latitude: number, longitude: number }, zone: string, runs: number, hours: number): PlaceWork {
   const place = { latitudeDeg: point.latitude, longitudeDeg: point.longitude, elevationM: weather.elevationM ?? 0 }
-  const stretch = (hourly: HourlyWeather, localHour: Uint8Array): Stretch => ({ weather: hourly, etoMm: hourlyReferenceEt(hourly, place), localHour })
+  const stretch = (hourly: HourlyWeather, localHour: Uint8Array, sun?: SunHour[]): Stretch => ({ weather: hourly, etoMm: hourlyReferenceEt(hourly, place, sun), localHour })
   const runHours = Math.min(...weather.runs.map(run => run.hours))
   const startsAt = weather.runs[0]!.startsAt
   const ahead = localHours(startsAt, runHours + SPELL_HOURS, zone)
   const pastHours = localHours(weather.past.startsAt, weather.past.hours, zone).hourOfDay
   const spell = drySpell(ordinaryDryDay(weather.past, pastHours), startsAt + runHours * 3600, ahead.hourOfDay.subarray(runHours))
+  const sun = sunOfHours(startsAt, runHours, place)
   const used = weather.runs.slice(0, runs).map(run => firstHours(run, runHours))
   return {
     weather,
     runHours,
     past: stretch(weather.past, pastHours),
-    runs: used.map(run => stretch(run, ahead.hourOfDay.subarray(0, runHours))),
+    runs: used.map(run => stretch(run, ahead.hourOfDay.subarray(0, runHours), sun)),
     spell: stretch(spell, ahead.hourOfDay.subarray(runHours)),
     ahead,
     rainAt: Float64Array.from(used, run => rainOnset(run.rainMm, hours)),

@@ -1,5 +1,5 @@
 import type { HourlyWeather } from '../../../shared/agronomy/weather/hourly'
-import type { PlaceId } from '../../../shared/types/ids'
+import type { ForecastId, PlaceId } from '../../../shared/types/ids'
 import type { Db } from '../../db/client'
 import { unpackBlock } from '../../db/forecast-block'
 import { findNewestForecast, type ForecastRow } from '../../db/queries/forecasts'
@@ -34,13 +34,13 @@ export function weatherFor(db: Db, place: { id: PlaceId, elevationM: number | nu
   const runsRow = findNewestForecast(db, place.id, 'runs', at)
   if (!forecastRow || !runsRow) return { missing: 'No forecast has come for it yet' }
   if (freshness(forecastRow.fetchedAt, at) === 'expired' || freshness(runsRow.fetchedAt, at) === 'expired') return { missing: 'Its forecast is too old to work anything out from' }
-  const whole = unpackBlock(forecastRow.data, FORECAST_VARIABLES, 1, forecastRow.hours)[0]!
+  const whole = columnsOf(forecastRow, FORECAST_VARIABLES)[0]!
   const past = pastOf(db, place.id, hour, options.pastHours, forecastRow, whole)
   if (!past) return { missing: 'Its past weather has a gap' }
   return {
     past,
     forecast: ahead(forecastRow, whole, hour, options.aheadHours),
-    runs: unpackBlock(runsRow.data, RUN_VARIABLES, runsRow.runs, runsRow.hours).map(run => ahead(runsRow, run, hour, options.aheadHours)),
+    runs: columnsOf(runsRow, RUN_VARIABLES).map(run => ahead(runsRow, run, hour, options.aheadHours)),
     issuedAt: runsRow.issuedAt,
     fetchedAt: forecastRow.fetchedAt,
     source: forecastRow.source,
@@ -49,11 +49,25 @@ export function weatherFor(db: Db, place: { id: PlaceId, elevationM: number | nu
   }
 }
 
+/** Forecasts kept unpacked, the newest used last: the runs of one are some 300 kB. */
+const MOST_UNPACKED = 64
+const unpacked = new Map<ForecastId, Record<WeatherVariable, Float64Array>[]>()
+
+/** A stored forecast's values, an element a run; a forecast never changes. Nobody writes to them. */
+function columnsOf<Variable extends WeatherVariable>(row: ForecastRow, variables: readonly Variable[]): Record<Variable, Float64Array>[] {
+  const known = unpacked.get(row.id)
+  const columns = known ?? unpackBlock(row.data, variables, row.runs, row.hours) as Record<WeatherVariable, Float64Array>[]
+  unpacked.delete(row.id)
+  unpacked.set(row.id, columns)
+  if (unpacked.size > MOST_UNPACKED) unpacked.delete(unpacked.keys().next().value!)
+  return columns
+}
+
 /** Hours of a stored forecast from the current one on. */
 function ahead<Column extends WeatherVariable>(row: ForecastRow, columns: Record<Column, Float64Array>, hour: number, most: number): HourlyWeather & Record<Column, Float64Array> {
   const skipped = Math.max(0, (hour - row.startsAt.getTime()) / HOUR_MS)
   const hours = Math.max(0, Math.min(most, row.hours - skipped))
-  const cut = Object.fromEntries(Object.entries<Float64Array>(columns).map(([name, column]) => [name, column.slice(skipped, skipped + hours)]))
+  const cut = Object.fromEntries(Object.entries<Float64Array>(columns).map(([name, column]) => [name, column.subarray(skipped, skipped + hours)]))
   return { startsAt: row.startsAt.getTime() / 1000 + skipped * 3600, hours, ...cut } as HourlyWeather & Record<Column, Float64Array>
 }
 

@@ -115,26 +115,27 @@ export interface Place {
  *
  * @param weather - every value known
  * @param place - degrees, east positive; metres
+ * @param sun - of these hours there; given once for many runs of a forecast
  * @returns mm in each hour, `weather.hours` long; dew is left out, so never negative
  * @throws {RangeError} naming the first hour with a missing value
  */
-export function hourlyReferenceEt(weather: HourlyWeather, place: Place): Float64Array {
+export function hourlyReferenceEt(weather: HourlyWeather, place: Place, sun = sunOfHours(weather.startsAt, weather.hours, place)): Float64Array {
   const result = new Float64Array(weather.hours)
   const gamma = psychrometricConstant(airPressureKpa(place.elevationM))
   let nightClearness = NIGHT_CLEARNESS
   for (let i = 0; i < weather.hours; i++) {
-    const sun = sunOfHour(weather.startsAt + i * SECONDS_PER_HOUR, place)
+    const { extraterrestrial, clearSky, isDusk, isWholeHour } = sun[i]!
     const radiation = weather.radiationWm2[i]! * SECONDS_PER_HOUR / 1e6
-    const own = Math.min(1, Math.max(LEAST_CLEARNESS, radiation / clearSkyRadiation(sun.extraterrestrial, place.elevationM)))
-    if (sun.hoursToSunset > DUSK_TO_H && sun.hoursToSunset <= DUSK_FROM_H) nightClearness = own
+    const own = Math.min(1, Math.max(LEAST_CLEARNESS, radiation / clearSky))
+    if (isDusk) nightClearness = own
     const temperatureC = weather.temperatureC[i]!
     const mm = penmanMonteithHour({
       temperatureC,
       vapourKpa: saturationVapourPressure(temperatureC) * weather.humidityPct[i]! / 100,
       wind2mMs: windAt10mTo2m(weather.windMs[i]!),
       radiation,
-      clearness: sun.wholeHour ? own : nightClearness,
-      daytime: sun.extraterrestrial > 0,
+      clearness: isWholeHour ? own : nightClearness,
+      daytime: extraterrestrial > 0,
     }, gamma)
     if (!Number.isFinite(mm)) throw new RangeError(`The weather of the hour from ${new Date((weather.startsAt + i * SECONDS_PER_HOUR) * 1000).toISOString()} has a gap`)
     result[i] = Math.max(0, mm)
@@ -147,17 +148,38 @@ function windAt10mTo2m(windMs: number): number {
   return Number.isNaN(windMs) ? Number.NaN : windAt2m(windMs, 10)
 }
 
-/** The sun in an hour that starts at a Unix second: the sun angle is taken in its middle. */
-function sunOfHour(startsAt: number, place: Place): { extraterrestrial: number, hoursToSunset: number, wholeHour: boolean } {
-  const middle = new Date((startsAt + SECONDS_PER_HOUR / 2) * 1000)
-  const dayOfYear = dayOfYearUtc(middle)
-  const angle = wrapped(hourAngle(middle.getUTCHours() + middle.getUTCMinutes() / 60, 0, -place.longitudeDeg, dayOfYear))
-  const sunset = sunsetHourAngle(place.latitudeDeg, dayOfYear)
-  return {
-    extraterrestrial: extraterrestrialHour(place.latitudeDeg, dayOfYear, angle),
-    hoursToSunset: (sunset - angle) * 12 / Math.PI,
-    wholeHour: Math.abs(angle) + Math.PI / 24 <= sunset,
-  }
+/** The sun in an hour. */
+export interface SunHour {
+  /** MJ m⁻² h⁻¹ */
+  extraterrestrial: number
+  /** MJ m⁻² h⁻¹ */
+  clearSky: number
+  /** 2 to 3 hours before sunset */
+  isDusk: boolean
+  /** wholly between sunrise and sunset */
+  isWholeHour: boolean
+}
+
+/**
+ * The sun in each of a row of hours; its angle is taken in the middle of the hour. FAO-56 eqs 25, 28, 31 and 37.
+ *
+ * @param startsAt - Unix seconds of the first hour
+ */
+export function sunOfHours(startsAt: number, hours: number, place: Place): SunHour[] {
+  return Array.from({ length: hours }, (_, i) => {
+    const middle = new Date((startsAt + (i + 0.5) * SECONDS_PER_HOUR) * 1000)
+    const dayOfYear = dayOfYearUtc(middle)
+    const angle = wrapped(hourAngle(middle.getUTCHours() + middle.getUTCMinutes() / 60, 0, -place.longitudeDeg, dayOfYear))
+    const sunset = sunsetHourAngle(place.latitudeDeg, dayOfYear)
+    const hoursToSunset = (sunset - angle) * 12 / Math.PI
+    const extraterrestrial = extraterrestrialHour(place.latitudeDeg, dayOfYear, angle)
+    return {
+      extraterrestrial,
+      clearSky: clearSkyRadiation(extraterrestrial, place.elevationM),
+      isDusk: hoursToSunset > DUSK_TO_H && hoursToSunset <= DUSK_FROM_H,
+      isWholeHour: Math.abs(angle) + Math.PI / 24 <= sunset,
+    }
+  })
 }
 
 function dayOfYearUtc(date: Date): number {
