@@ -21,7 +21,6 @@ export interface Moment {
   windMs: number
   gustMs: number
   windFromDeg: number
-  radiationWm2: number
 }
 
 const REFERENCE = { latitude: 46.9, longitude: -96.8 }
@@ -82,9 +81,9 @@ function noisesAt(time: number, scenario: Scenario): Noises {
 /** mm that fall between two instants (Unix hours) at a place. */
 export function rainBetween(from: number, to: number, place: Place, scenario: Scenario): number {
   let mm = 0
-  for (const front of frontsNear(from, place, 40)) {
-    const { startsAt, total } = believed(front, place, scenario)
-    mm += total * (shareFallen((to - startsAt) / front.hours) - shareFallen((from - startsAt) / front.hours))
+  for (const passing of frontsNear(from, place, 40)) {
+    const { startsAt, total } = believed(passing, scenario)
+    mm += total * (shareFallen((to - startsAt) / passing.front.hours) - shareFallen((from - startsAt) / passing.front.hours))
   }
   return mm < 0.02 ? 0 : mm
 }
@@ -92,9 +91,8 @@ export function rainBetween(from: number, to: number, place: Place, scenario: Sc
 /** Weather at an instant (Unix hours) at a place. */
 export function momentAt(time: number, place: Place, scenario: Scenario): Moment {
   const noises = noisesAt(time, scenario)
-  const since = frontsNear(time, place, 60).map(front => ({ front, hours: time - believed(front, place, scenario).startsAt }))
+  const since = sinceFronts(time, place, scenario)
   const cloud = cloudAt(noises, since)
-  const altitude = sineOfSun(time, place)
   const temperatureC = temperatureAt(time, place, cloud, since, noises)
   const raining = since.some(({ front, hours }) => hours > 0 && hours < front.hours)
   const depression = Math.max(0.3, (raining ? 0.8 : 6.5) + (raining ? 0 : 2.2) * noises.dew * 0.6 + (raining ? 0 : 5) * Math.max(-0.7, swing(time, place)))
@@ -108,19 +106,51 @@ export function momentAt(time: number, place: Place, scenario: Scenario): Moment
     windMs,
     gustMs: windMs * (1.45 + 0.15 * Math.abs(noises.gust)),
     windFromDeg,
-    // Clear-sky transmission and cloud attenuation in the usual simple forms.
-    radiationWm2: altitude <= 0 ? 0 : SOLAR_CONSTANT_WM2 * altitude * 0.76 * (1 - 0.72 * cloud ** 2.2),
   }
 }
 
-function frontsNear(time: number, place: Place, hours: number): Front[] {
-  const shift = delayHours(place)
-  return FRONTS.filter(front => Math.abs(front.startsAt + shift + front.hours / 2 - time) < hours)
+/** Radiation at an instant, W/m²: clear-sky transmission and cloud attenuation in the usual simple forms. */
+export function radiationAt(time: number, place: Place, scenario: Scenario): number {
+  const altitude = sineOfSun(time, place)
+  if (altitude <= 0) return 0
+  return SOLAR_CONSTANT_WM2 * altitude * 0.76 * (1 - 0.72 * cloudAt(noisesAt(time, scenario), sinceFronts(time, place, scenario)) ** 2.2)
+}
+
+interface SinceFront { front: Front, hours: number }
+
+/** Hours since each front near in time has come, as the scenario has it; negative: it is still to come. */
+function sinceFronts(time: number, place: Place, scenario: Scenario): SinceFront[] {
+  return frontsNear(time, place, 60).map(passing => ({ front: passing.front, hours: time - believed(passing, scenario).startsAt }))
+}
+
+/** A front as it passes a place: when it arrives there, and what it brings. */
+interface Passing { front: Front, arrives: number, mm: number }
+const passings = new Map<string, Passing[]>()
+
+function passingsAt(place: Place): Passing[] {
+  const key = `${place.latitude} ${place.longitude}`
+  const known = passings.get(key)
+  if (known) return known
+  const delay = delayHours(place)
+  const made = FRONTS.map(front => ({ front, arrives: front.startsAt + delay, mm: front.mm * shareHere(front, place) }))
+  passings.set(key, made)
+  return made
+}
+
+function frontsNear(time: number, place: Place, hours: number): Passing[] {
+  const near: Passing[] = []
+  for (const passing of passingsAt(place)) if (Math.abs(passing.arrives + passing.front.hours / 2 - time) < hours) near.push(passing)
+  return near
 }
 
 /** Hours after the reference meridian at which a front reaches a place. */
 function delayHours(place: Place): number {
   return (place.longitude - REFERENCE.longitude) * KM_PER_DEGREE * Math.cos(place.latitude * Math.PI / 180) / FRONT_KMH
+}
+
+/** What a place gets of a front, as a share of the front's own amount. */
+function shareHere(front: Front, place: Place): number {
+  return Math.exp(0.1 * wandering(place.latitude * 12, 1, KEY.place, front.id) + 0.1 * wandering(place.longitude * 9, 1, KEY.place, front.id, 1))
 }
 
 /**
@@ -129,9 +159,7 @@ function delayHours(place: Place): number {
  * The truth is one draw around the forecast's middle, each run another of the same spread: so rain comes as often as
  * the runs say.
  */
-function believed(front: Front, place: Place, scenario: Scenario): { startsAt: number, total: number } {
-  const arrives = front.startsAt + delayHours(place)
-  const total = front.mm * shareHere(front, place)
+function believed({ front, arrives, mm: total }: Passing, scenario: Scenario): { startsAt: number, total: number } {
   const lead = arrives - scenario.madeAt
   if (!Number.isFinite(scenario.madeAt) || lead < -front.hours) return { startsAt: arrives, total }
   const { timing, amount } = errorsOf(front, scenario)
@@ -152,18 +180,6 @@ function errorsOf(front: Front, scenario: Scenario): { timing: number, amount: n
   return made
 }
 
-const sharesHere = new Map<string, number>()
-
-/** What a place gets of a front, as a share of the front's own amount. */
-function shareHere(front: Front, place: Place): number {
-  const key = `${front.id} ${place.latitude} ${place.longitude}`
-  const known = sharesHere.get(key)
-  if (known !== undefined) return known
-  const made = Math.exp(0.1 * wandering(place.latitude * 12, 1, KEY.place, front.id) + 0.1 * wandering(place.longitude * 9, 1, KEY.place, front.id, 1))
-  sharesHere.set(key, made)
-  return made
-}
-
 /** Share of a front's rain that has fallen after a share of its time: slow, heavy, slow. */
 function shareFallen(x: number): number {
   if (x <= 0) return 0
@@ -171,7 +187,7 @@ function shareFallen(x: number): number {
   return x * x * (3 - 2 * x)
 }
 
-function cloudAt(noises: Noises, since: { front: Front, hours: number }[]): number {
+function cloudAt(noises: Noises, since: SinceFront[]): number {
   let cloud = 0.35 + 0.22 * noises.cloud + noises.cloudError * 0.03
   for (const { front, hours } of since) {
     const ahead = Math.max(0, 1 + hours / 14)
@@ -181,7 +197,7 @@ function cloudAt(noises: Noises, since: { front: Front, hours: number }[]): numb
   return Math.min(1, Math.max(0.02, cloud))
 }
 
-function temperatureAt(time: number, place: Place, cloud: number, since: { front: Front, hours: number }[], noises: Noises): number {
+function temperatureAt(time: number, place: Place, cloud: number, since: SinceFront[], noises: Noises): number {
   const day = time / 24
   const yearDay = day - Date.UTC(2025, 0, 1) / 86_400_000
   const north = (place.latitude - REFERENCE.latitude) * 0.8
@@ -202,7 +218,7 @@ function swing(time: number, place: Place): number {
 }
 
 /** South-east wind ahead of a front, north-west behind it. */
-function windAt(time: number, place: Place, since: { front: Front, hours: number }[], noises: Noises): { windMs: number, windFromDeg: number } {
+function windAt(time: number, place: Place, since: SinceFront[], noises: Noises): { windMs: number, windFromDeg: number } {
   let speed = 4 + 1.1 * noises.wind + 1.3 * swing(time, place) + 0.02 * noises.windError
   let direction = 200 + 60 * noises.direction
   for (const { front, hours } of since) {

@@ -1,4 +1,4 @@
-import { momentAt, rainBetween, TRUTH, type Moment, type Place, type Scenario } from './season'
+import { momentAt, radiationAt, rainBetween, TRUTH, type Moment, type Place, type Scenario } from './season'
 
 /** What the invented service would answer: hour labels as the real one has them. */
 
@@ -16,7 +16,7 @@ export function availableAt(cycle: number): number {
   return cycle + AVAILABLE_AFTER_HOURS
 }
 
-/** A value at its label, from the moment of the label, the middle of the hour before it, and that hour's rain. */
+/** A value at its label, from the moment of the label, the middle of the hour before it, and that hour's rain. Gusts of runs are never asked for. */
 const VARIABLES = {
   temperature_2m: ({ at }) => at.temperatureC,
   relative_humidity_2m: ({ at }) => at.humidityPct,
@@ -24,12 +24,12 @@ const VARIABLES = {
   cloud_cover: ({ at }) => at.cloudPct,
   wind_speed_10m: ({ at }) => at.windMs,
   wind_direction_10m: ({ at }) => at.windFromDeg,
-  wind_gusts_10m: ({ before }) => before.gustMs,
+  wind_gusts_10m: ({ gustMs }) => gustMs(),
   precipitation: ({ rainMm }) => rainMm,
-  shortwave_radiation: ({ before }) => before.radiationWm2,
+  shortwave_radiation: ({ radiationWm2 }) => radiationWm2,
 } satisfies Record<string, (hour: Hour) => number>
 
-interface Hour { at: Moment, before: Moment, rainMm: number }
+interface Hour { at: Moment, gustMs: () => number, radiationWm2: number, rainMm: number }
 
 export type Variable = keyof typeof VARIABLES
 
@@ -66,7 +66,12 @@ function hoursOf(place: Place, from: number, hours: number, nowHours: number, ru
 }
 
 function hourOf(place: Place, label: number, scenario: Scenario): Hour {
-  return { at: momentAt(label, place, scenario), before: momentAt(label - 0.5, place, scenario), rainMm: rainBetween(label - 1, label, place, scenario) }
+  return {
+    at: momentAt(label, place, scenario),
+    gustMs: () => momentAt(label - 0.5, place, scenario).gustMs,
+    radiationWm2: radiationAt(label - 0.5, place, scenario),
+    rainMm: rainBetween(label - 1, label, place, scenario),
+  }
 }
 
 const past = new Map<string, Hour>()

@@ -6,7 +6,7 @@ import { hourlyWeather } from '../schema'
 /** Writes hours that are over; a later analysis of an hour replaces an earlier one. One prepared statement: a first pull brings thousands. */
 export function upsertHours(db: DbOrTransaction, hours: (typeof hourlyWeather.$inferInsert)[]): void {
   const { placeId, startsAt, source, ...rest } = getTableColumns(hourlyWeather)
-  const excluded = (name: string) => sql.raw(`excluded.${name.replaceAll(/[A-Z]/g, letter => `_${letter.toLowerCase()}`)}`)
+  const excluded = (name: string) => sql`excluded.${sql.identifier(name.replaceAll(/[A-Z]/g, letter => `_${letter.toLowerCase()}`))}`
   const given = Object.fromEntries(Object.keys({ placeId, startsAt, source, ...rest }).map(name => [name, sql.placeholder(name)]))
   const upsert = db.insert(hourlyWeather)
     .values(given as unknown as typeof hourlyWeather.$inferInsert)

@@ -12,11 +12,24 @@ export interface LocalHours {
 }
 
 /**
- * The farm's clock for a row of hours, right on both days of the year when clocks change.
+ * The farm's clock for a row of hours, right on both days of the year when clocks change. All places of a farm ask for
+ * the same few rows, so the last ones are kept; nobody writes to them.
  *
  * @param startsAt - Unix seconds of the first hour
  */
 export function localHours(startsAt: number, hours: number, zone: string): LocalHours {
+  const key = `${zone} ${startsAt} ${hours}`
+  const made = kept.get(key) ?? makeLocalHours(startsAt, hours, zone)
+  kept.delete(key)
+  kept.set(key, made)
+  if (kept.size > MOST_KEPT) kept.delete(kept.keys().next().value!)
+  return made
+}
+
+const MOST_KEPT = 16
+const kept = new Map<string, LocalHours>()
+
+function makeLocalHours(startsAt: number, hours: number, zone: string): LocalHours {
   const result: LocalHours = { hourOfDay: new Uint8Array(hours), calendarDay: new Uint16Array(hours), localDay: [] }
   const offsetMs = offsetOfHours(startsAt, zone)
   let localDay = '' as LocalDay

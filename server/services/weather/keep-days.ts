@@ -43,13 +43,17 @@ function hoursOf(answer: PlaceAnswer, from: number, to: number): Hour[] {
   return Array.from({ length: Math.max(0, to - from) }, (_, i) => ({ startsAt: answer.startsAt + (from + i) * 3600, rainMm: run.rainMm![from + i]!, temperatureC: run.temperatureC![from + i]! }))
 }
 
+/** @param hours - in the order of time: the time zone is slow to ask, so it is asked once a day */
 function byDay(hours: Hour[], zone: string): Map<LocalDay, Hour[]> {
   const days = new Map<LocalDay, Hour[]>()
+  let [today, until]: [Hour[], number] = [[], -Infinity]
   for (const hour of hours) {
-    const day = localDayOf(new Date(hour.startsAt * 1000), zone)
-    const known = days.get(day)
-    if (known) known.push(hour)
-    else days.set(day, [hour])
+    if (hour.startsAt >= until) {
+      const day = localDayOf(new Date(hour.startsAt * 1000), zone)
+      until = boundsOfLocalDay(day, zone).to.getTime() / 1000
+      days.set(day, today = [])
+    }
+    today.push(hour)
   }
   return days
 }

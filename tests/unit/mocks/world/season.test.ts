@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { FRONTS } from '../../../../mocks/world/fronts'
-import { momentAt, rainBetween, TRUTH } from '../../../../mocks/world/season'
+import { momentAt, radiationAt, rainBetween, TRUTH } from '../../../../mocks/world/season'
 import { column, newestCycle, RUNS } from '../../../../mocks/world/service'
 
 const farm = { latitude: 46.9, longitude: -96.8 }
@@ -20,8 +20,8 @@ describe('the invented season', () => {
       const moment = momentAt(time, farm, TRUTH)
       expect(moment.humidityPct).toBeLessThanOrEqual(100)
       expect(moment.dewPointC).toBeLessThanOrEqual(moment.temperatureC)
-      expect(moment.radiationWm2).toBeLessThan(1100)
-      if (time % 24 === 6) expect(moment.radiationWm2).toBe(0)
+      expect(radiationAt(time, farm, TRUTH)).toBeLessThan(1100)
+      if (time % 24 === 6) expect(radiationAt(time, farm, TRUTH)).toBe(0)
       if (rainBetween(time - 0.5, time + 0.5, farm, TRUTH) > 0.3) expect(moment.cloudPct).toBeGreaterThan(60)
     }
   })
