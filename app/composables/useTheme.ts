@@ -4,5 +4,10 @@ export type Theme = 'light' | 'night'
 export function useTheme() {
   const cookie = useCookie<Theme | null>('theme', { sameSite: 'lax', maxAge: 365 * 24 * 3600, default: () => null })
   useHead({ htmlAttrs: { 'data-theme': () => cookie.value ?? undefined } })
-  return { theme: cookie, set: (theme: Theme) => cookie.value = theme }
+  /** To the other of the two, from the one that shows now. */
+  function toggle(): void {
+    const shown = cookie.value ?? (matchMedia('(prefers-color-scheme: dark)').matches ? 'night' : 'light')
+    cookie.value = shown === 'night' ? 'light' : 'night'
+  }
+  return { toggle }
 }

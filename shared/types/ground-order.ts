@@ -62,7 +62,7 @@ export interface RainLine {
 }
 
 export interface Ribbon {
-  /** Mean over the runs, mm in the hour. */
+  /** In the middle run, as ground and bars are drawn, mm in the hour. */
   rainMm: number[]
   /** Share of runs wetter than 0.1 mm in the hour, 0 to 1. */
   chance: number[]

@@ -9,13 +9,17 @@ import type { PlaceWork } from './place-work'
 /** Hours of a local day that must be known before its low and high are. */
 const MOST_OF_A_DAY_HOURS = 18
 
-/** The weather along the axis at one place. */
-export function ribbon({ weather, runs, ahead }: PlaceWork, point: { latitude: number, longitude: number }, zone: string, hours: number): Ribbon {
+/**
+ * The weather along the axis at one place.
+ *
+ * @param middle - index of the run whose rain is drawn, as are the ground and the bars
+ */
+export function ribbon({ weather, runs, ahead }: PlaceWork, point: { latitude: number, longitude: number }, zone: string, hours: number, middle: number): Ribbon {
   const { forecast } = weather
   const { meanMm, wetShare } = hourlyRain(runs.map(run => run.weather.rainMm), hours)
   const cut = (column: Float64Array, digits: number) => Array.from(column.subarray(0, hours), value => rounded(value, digits))
   return {
-    rainMm: cut(meanMm, 3),
+    rainMm: cut(runs[middle]!.weather.rainMm, 3),
     chance: cut(wetShare, 3),
     temperatureC: cut(forecast.temperatureC, 1),
     windMs: cut(forecast.windMs, 1),

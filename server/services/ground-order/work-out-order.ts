@@ -34,7 +34,7 @@ export function workOutOrder(given: FarmInputs): GroundOrder {
     axis: { startsAt: at(0), hours: places.reference ? places.hours : HORIZON_HOURS },
     forecast: inputs.forecast,
     rainLine: line,
-    ribbon: places.reference && ribbon(places.reference, farm, farm.zone, places.hours),
+    ribbon: places.reference && onset && ribbon(places.reference, farm, farm.zone, places.hours, onset.middle),
     rows,
     planted: plantedFields(inputs, seasons),
     machines: machineLanes(inputs, rows),

@@ -76,7 +76,7 @@ function frozen({ fitAt, rainAt }: ReasonFacts, say: Say): string {
 function cold({ seedZoneC, minimumSoilC, cropName }: ReasonFacts, say: Say): string {
   if (seedZoneC >= minimumSoilC) return `Warm enough, but cold rain is coming and would chill ${cropName} seed`
   const [seed, wanted] = [say.temperature(seedZoneC), say.temperature(minimumSoilC)]
-  return `Dry enough, too cold: ${seed === wanted ? 'just under ' : ''}${seed} at seed depth, ${cropName} wants ${wanted}`
+  return `Dry enough, but ${seed === wanted ? 'just under ' : ''}${seed} at seed depth; wants ${wanted}`
 }
 
 function inField({ machine, areaLeftAc, doneAt }: NonNullable<ReasonFacts['inField']>, say: Say): string {
@@ -88,7 +88,7 @@ function inField({ machine, areaLeftAc, doneAt }: NonNullable<ReasonFacts['inFie
 function nothingAtStake(facts: ReasonFacts, say: Say): string {
   const { ground, fitAt, rainAt, cropName } = facts
   if (ground !== 'fit' && (fitAt === null || (rainAt !== null && fitAt >= rainAt))) return wetUntilRain(rainAt)
-  return `${fitSince(facts, say)}; waiting out the rain costs ${cropName} next to nothing yet`
+  return `${fitSince(facts, say)}; waiting costs ${cropName} almost nothing yet`
 }
 
 function wetUntilRain(rainAt: number | null): string {

@@ -1,4 +1,4 @@
-/** An instant as the farm's clock shows it. Never the browser's zone. */
+/** An instant as the farm's clock shows it, in words. Never the browser's zone, nor the server's. */
 const WEEKDAYS = ['Sunday', 'Monday', 'Tuesday', 'Wednesday', 'Thursday', 'Friday', 'Saturday']
 const MONTHS = ['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun', 'Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec']
 
@@ -29,14 +29,20 @@ export function sayClock(instant: string, zone: string): string {
   return `${hour % 12 || 12}${minute ? `:${String(minute).padStart(2, '0')}` : ''} ${hour < 12 ? 'am' : 'pm'}`
 }
 
-/** 'Thursday 3 pm'. */
+/** 'Thursday 3 pm'; at midnight 'Thursday/Friday midnight', since people differ on whose midnight it is. */
 export function sayDayClock(instant: string, zone: string): string {
-  return `${localTime(instant, zone).weekday} ${sayClock(instant, zone)}`
+  return withDay(instant, zone, weekday => weekday)
 }
 
-/** 'Thu 3 pm'. */
+/** 'Thu 3 pm', 'Thu/Fri midnight'. */
 export function sayShortDayClock(instant: string, zone: string): string {
-  return `${localTime(instant, zone).weekday.slice(0, 3)} ${sayClock(instant, zone)}`
+  return withDay(instant, zone, weekday => weekday.slice(0, 3))
+}
+
+function withDay(instant: string, zone: string, name: (weekday: string) => string): string {
+  const { weekday, hour, minute } = localTime(instant, zone)
+  const before = WEEKDAYS[(WEEKDAYS.indexOf(weekday) + 6) % 7]!
+  return `${hour === 0 && minute === 0 ? `${name(before)}/` : ''}${name(weekday)} ${sayClock(instant, zone)}`
 }
 
 /** 'Tue 6'. */
