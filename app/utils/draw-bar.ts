@@ -1,7 +1,6 @@
 import type { Pass } from '#shared/types/ground-order'
 import { round } from './time-axis'
 
-export const PASS_NAMES: Record<Pass, string> = { dig: 'Dig', rocks: 'Rocks', plant: 'Plant', roll: 'Roll', spray: 'Spray' }
 const BODY = 12
 
 /** Outline of a bar whose lower edge is what the machine leaves: teeth, bumps; the others are plain. */

@@ -23,6 +23,12 @@ export function widthOf(axis: TimeAxis): number {
   return round(axis.hours * axis.pxPerHour)
 }
 
+/** Room for words behind something that ends at an instant, px: up to what comes next, and never across the rain line. */
+export function roomAfter(axis: TimeAxis, end: string, next: string | null, rainAt: string | null): number {
+  const stops = [widthOf(axis), ...[next, rainAt].flatMap(stop => stop !== null && stop >= end ? [xOf(axis, stop)] : [])]
+  return round(Math.min(...stops) - xOf(axis, end))
+}
+
 /** Tenths of a pixel keep the page small and the server's drawing equal to the browser's. */
 export function round(value: number): number {
   return Math.round(value * 10) / 10

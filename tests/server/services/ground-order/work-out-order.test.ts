@@ -72,7 +72,7 @@ describe('workOutOrder', () => {
 
   it('calls warm-crop ground Cold and says what the crop wants', () => {
     const worked = order({ fields: [madeField('North', { cropId: 'cold-corn' as CropId })] })
-    expect(worked.rows[0]).toMatchObject({ ground: 'cold', beforeRain: false, reason: expect.stringMatching(/^Dry enough, too cold: \d+°F at seed depth, corn wants 77°F$/) })
+    expect(worked.rows[0]).toMatchObject({ ground: 'cold', beforeRain: false, reason: expect.stringMatching(/^Dry enough, but \d+°F at seed depth; wants 77°F$/) })
   })
 
   it('gives nights from sunset to sunrise, each day its low and high, and null for a day that is hardly known', () => {

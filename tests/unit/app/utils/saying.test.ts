@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import { safeNext } from '../../../../app/utils/safe-next'
 import { sayChance, shortChance } from '../../../../app/utils/say-chance'
-import { round, widthOf, xOf, xWithin } from '../../../../app/utils/time-axis'
+import { roomAfter, round, widthOf, xOf, xWithin } from '../../../../app/utils/time-axis'
 
 describe('chances', () => {
   it('are said to the tenth, and never as 0 or 100', () => {
@@ -15,6 +15,9 @@ describe('the time axis', () => {
   it('is linear, 6.8 px an hour', () => {
     expect(widthOf(axis)).toBe(816)
     expect(xOf(axis, '2025-05-08T20:00:00Z')).toBe(round(58 * 6.8))
+    expect(roomAfter(axis, '2025-05-06T20:00:00Z', null, null)).toBe(816 - 68)
+    expect(roomAfter(axis, '2025-05-06T20:00:00Z', '2025-05-07T06:00:00Z', '2025-05-07T01:00:00Z')).toBe(34)
+    expect(roomAfter(axis, '2025-05-07T02:00:00Z', '2025-05-07T06:00:00Z', '2025-05-07T01:00:00Z')).toBe(27.2)
     expect([xWithin(axis, '2025-05-01T00:00:00Z'), xWithin(axis, '2025-06-01T00:00:00Z')]).toEqual([0, 816])
   })
 })
