@@ -1,4 +1,4 @@
-import { spawn, type ChildProcess } from 'node:child_process'
+import { execFileSync, spawn, type ChildProcess } from 'node:child_process'
 import { once } from 'node:events'
 import { mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
 import { createServer } from 'node:net'
@@ -16,6 +16,8 @@ export interface DemoServer {
   password: string
   /** Makes the invented weather service fail in one of its ways, until called with null. */
   trouble: (mode: string | null) => void
+  /** Refuses any write of the server to a file, as a disk without room does, until called with false. */
+  refuseWrites: (refused: boolean) => void
   /** What the server has printed so far. */
   log: () => string
   /** Asks the server to end, and tells with which code it did; its data stay until `stop`. */
@@ -54,6 +56,7 @@ export async function startDemoServer(settings: Record<string, string> = {}): Pr
     dataDir,
     password,
     trouble: mode => writeFileSync(troubleFile, mode ?? ''),
+    refuseWrites: refused => void execFileSync('prlimit', ['--pid', String(server.pid), `--fsize=${refused ? '0' : 'unlimited'}:unlimited`]),
     log: () => printed,
     end,
     async stop() {
