@@ -1,8 +1,7 @@
 import { ofetch } from 'ofetch'
 import type { Outcome } from './weather-gateway'
 
-/** Longest that a call may take, and how large an answer may be. */
-const TOTAL_MS = 10_000
+/** How large an answer may be. */
 const MOST_BYTES = 24 * 1024 * 1024
 const TRIES = 3
 const FIRST_WAIT_MS = 1000
@@ -12,6 +11,8 @@ export interface Caller {
   /** 0 to 1 */
   random: () => number
   sleep: (ms: number) => Promise<void>
+  /** longest that one try may take, answer and all */
+  patienceMs: number
 }
 
 type Try = { ok: true, value: unknown } | { ok: false, trouble: string, again: boolean, retryAfterMs: number }
@@ -22,17 +23,17 @@ type Try = { ok: true, value: unknown } | { ok: false, trouble: string, again: b
  */
 export async function fetchJson(url: string, caller: Caller): Promise<Outcome<unknown>> {
   for (let attempt = 1; ; attempt++) {
-    const result = await tryOnce(url)
+    const result = await tryOnce(url, caller.patienceMs)
     if (result.ok) return result
     if (!result.again || attempt === TRIES || result.retryAfterMs > LONGEST_WAIT_MS) return { ok: false, trouble: result.trouble }
     await caller.sleep(Math.max(result.retryAfterMs, caller.random() * Math.min(LONGEST_WAIT_MS, FIRST_WAIT_MS * 4 ** (attempt - 1))))
   }
 }
 
-async function tryOnce(url: string): Promise<Try> {
+async function tryOnce(url: string, patienceMs: number): Promise<Try> {
   const failed = (trouble: string, again: boolean, retryAfterMs = 0): Try => ({ ok: false, trouble, again, retryAfterMs })
   const stop = new AbortController()
-  const timer = setTimeout(() => stop.abort(), TOTAL_MS)
+  const timer = setTimeout(() => stop.abort(), patienceMs)
   try {
     const answer = await ofetch.raw<ReadableStream<Uint8Array>, 'stream'>(url, { responseType: 'stream', retry: 0, redirect: 'manual', ignoreResponseError: true, signal: stop.signal })
     if (answer.status >= 300 && answer.status < 400) return failed('The weather service sent us elsewhere, where we don\'t go.', false)

@@ -8,6 +8,8 @@ import { pullWeather } from './pull-weather'
 const HOUR_MS = 3_600_000
 /** Each hour at this minute: a new cycle is out by then. */
 const MINUTE = 41
+/** Longest that the service may take over an answer. */
+const PATIENCE_MS = 10_000
 let gateway: WeatherGateway | null = null
 
 /** Pulls every hour; after a stop, once. */
@@ -22,7 +24,7 @@ export const weatherPullJob: Job = {
     const { weather } = app.settings
     // The demo's time is invented, so there is no sense in waiting in real time before another try.
     const sleep = (ms: number) => new Promise<void>(resolve => setTimeout(resolve, app.demoClock ? 0 : ms))
-    gateway ??= createOpenMeteo(weather, app.clock.now, { random: Math.random, sleep })
+    gateway ??= createOpenMeteo(weather, app.clock.now, { random: Math.random, sleep, patienceMs: PATIENCE_MS })
     await pullWeather({ db: app.db, now: at, gateway, model: { forecast: weather.forecastModel, runs: weather.runsModel } })
     for (const farm of listFarms(app.db)) announceChange(farm.id)
   },
