@@ -40,6 +40,8 @@ export default defineNuxtConfig({
   },
   features: { inlineStyles: false },
   compatibilityDate: '2025-05-06',
+  // npm run dev answers for the outside services itself; a built server is given the fakes when it starts, or has none.
+  $development: { nitro: { plugins: ['~~/mocks/nitro-plugin.ts'] } },
   nitro: {
     preset: 'node-server',
     compressPublicAssets: true,

@@ -20,5 +20,5 @@ if (code !== 0) stop(`${output.slice(-2000)}\nThe demo farms could not be set up
 spawn('npx', ['nuxt', 'dev', '--port', port], {
   cwd: root,
   stdio: 'inherit',
-  env: { ...process.env, ...env, NODE_OPTIONS: `--import ${join(root, 'mocks/register.mjs')}` },
+  env: { ...process.env, ...env },
 }).on('exit', exit => process.exit(exit ?? 0))
