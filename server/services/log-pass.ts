@@ -7,30 +7,36 @@ import type { Farm } from '../db/queries/farms'
 import { findField } from '../db/queries/fields'
 import { findMachine, updateMachinePlace } from '../db/queries/machines'
 import { findLastWorkEnd, insertPassRecord, sumPassAcres, type PassRecordRow } from '../db/queries/pass-records'
-import { seasonStart } from './season'
+import { seasonOf } from './season'
 
 export type Logged
   = | { outcome: 'logged', record: PassRecordRow, doneBeforeAc: number }
-    | { outcome: 'no-field' | 'no-machine' | 'not-in-chain' | 'in-the-future' }
+    | { outcome: 'no-field' | 'no-machine' | 'wrong-machine' | 'not-in-chain' | 'in-the-future' | 'too-long-ago' }
     | { outcome: 'too-many-acres', leftAc: number }
 
 /** Acres by which a field may be overshot before somebody is asked to check: meters and maps differ. */
 const OVERSHOOT_SHARE = 0.05
+/** What lies longer back is a slip of the year: late entries are of this season or the one before. */
+const OLDEST_MS = 2 * 366 * 24 * 3_600_000
 
 /** Keeps acres that were worked in a field. Nothing is kept unless the outcome is `logged`. */
 export function logPass(tx: DbOrTransaction, { id: farmId, zone }: Pick<Farm, 'id' | 'zone'>, fieldId: string, personId: PersonId, now: Date, entry: z.output<typeof NewPassRecord>): Logged {
   const field = findField(tx, farmId, fieldId as FieldId)
   if (!field) return { outcome: 'no-field' }
   if (!field.chain.includes(entry.pass)) return { outcome: 'not-in-chain' }
-  if (entry.machineId !== null && !findMachine(tx, farmId, entry.machineId as MachineId)) return { outcome: 'no-machine' }
-  if (Date.parse(entry.endedAt) > now.getTime() + 60_000) return { outcome: 'in-the-future' }
-  const doneBeforeAc = sumPassAcres(tx, farmId, field.id, entry.pass, seasonStart(now, zone))
+  const machine = entry.machineId === null ? null : findMachine(tx, farmId, entry.machineId as MachineId)
+  if (machine === undefined) return { outcome: 'no-machine' }
+  if (machine && machine.pass !== entry.pass) return { outcome: 'wrong-machine' }
+  const endedAt = new Date(entry.endedAt)
+  if (endedAt.getTime() > now.getTime() + 60_000) return { outcome: 'in-the-future' }
+  if (endedAt.getTime() < now.getTime() - OLDEST_MS) return { outcome: 'too-long-ago' }
+  const doneBeforeAc = sumPassAcres(tx, farmId, field.id, entry.pass, seasonOf(endedAt, zone))
   const leftAc = field.areaAc - doneBeforeAc
   if (entry.areaAc > leftAc + OVERSHOOT_SHARE * field.areaAc) return { outcome: 'too-many-acres', leftAc }
-  if (entry.machineId !== null) moveMachine(tx, farmId, entry.machineId as MachineId, field.id, new Date(entry.endedAt))
+  if (machine) moveMachine(tx, farmId, machine.id, field.id, endedAt)
   const record = insertPassRecord(tx, {
-    id: randomUUID() as string as PassRecordId, farmId, fieldId: field.id, machineId: entry.machineId as MachineId | null, pass: entry.pass, areaAc: entry.areaAc,
-    startedAt: new Date(entry.startedAt), endedAt: new Date(entry.endedAt), note: entry.note, enteredBy: personId, enteredAt: now,
+    id: randomUUID() as string as PassRecordId, farmId, fieldId: field.id, machineId: machine?.id ?? null, pass: entry.pass, areaAc: entry.areaAc,
+    startedAt: new Date(entry.startedAt), endedAt, note: entry.note, enteredBy: personId, enteredAt: now,
   })
   return { outcome: 'logged', record, doneBeforeAc }
 }

@@ -19,7 +19,7 @@ export const OpenMeteoPlace = z.object({
   if (time.some((at, i) => at % 3600 !== 0 || (i > 0 && at - time[i - 1]! !== 3600))) context.addIssue('the hours are not whole hours in a row')
   for (const [name, values] of Object.entries(columns)) {
     const [, unit, [least, most]] = UNITS.find(([pattern]) => pattern.test(name)) ?? [null, null, [-Infinity, Infinity]]
-    if (unit !== null && answer.hourly_units[name] !== unit) context.addIssue(`${name} came in ${answer.hourly_units[name]}, not ${unit}`)
+    if (unit !== null && answer.hourly_units[name] !== unit) context.addIssue(`${name} came in ${String(answer.hourly_units[name]).slice(0, 20)}, not ${unit}`)
     if (values.length !== time.length) context.addIssue(`${name} has ${values.length} values for ${time.length} hours`)
     if (values.some(value => value !== null && !(value >= least && value <= most))) context.addIssue(`${name} holds values that no weather has`)
   }

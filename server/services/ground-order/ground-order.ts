@@ -1,6 +1,6 @@
 import { greatCircleKm } from '../../../shared/agronomy/machine/road'
 import type { FarmId } from '../../../shared/types/ids'
-import type { ForecastSummary, GroundOrder } from '../../../shared/types/ground-order'
+import type { GroundOrder } from '../../../shared/types/ground-order'
 import type { Db } from '../../db/client'
 import { listCrops } from '../../db/queries/crops'
 import type { Farm } from '../../db/queries/farms'
@@ -10,9 +10,8 @@ import { listPassTotals } from '../../db/queries/pass-records'
 import { listPlacesOfFarm, type PlaceRow } from '../../db/queries/places'
 import { listSoils } from '../../db/queries/soils'
 import { findNewestPull } from '../../db/queries/weather-pulls'
-import { seasonStart } from '../season'
-import { forecastSummary } from '../weather/forecast-summary'
-import { freshness } from '../weather/freshness'
+import { seasonOf } from '../season'
+import { farmForecast } from '../weather/forecast-summary'
 import { weatherFor } from '../weather/weather-for'
 import type { FarmInputs } from './farm-inputs'
 import { fieldSeason, isPlanted, type FieldSeason } from './field-season'
@@ -25,7 +24,8 @@ const AHEAD_HOURS = 7 * 24
 /** Farms of a database whose last order is kept in memory. */
 const MOST_KEPT = 50
 
-interface Kept { key: string, order: GroundOrder }
+/** An order, and until when its forecast is as fresh as it says. */
+interface Kept { key: string, until: Date | null, order: GroundOrder }
 const keptOf = new WeakMap<Db, Map<FarmId, Kept>>()
 
 /**
@@ -38,12 +38,14 @@ export function groundOrder(db: Db, farm: Farm, now: Date): GroundOrder {
   const kept = keptFarms(db)
   const known = kept.get(farm.id)
   const pull = findNewestPull(db)
-  const key = (forecast: ForecastSummary) => JSON.stringify([farm.revision, Math.floor(now.getTime() / HOUR_MS), forecast.fetchedAt, freshnessOf(forecast, now), pull?.id, pull?.outcome])
-  if (known && known.key === key(known.order.forecast)) return { ...known.order, now: now.toISOString() }
-  const order = workOutOrder(loadInputs(db, farm, now))
+  const key = JSON.stringify([farm.revision, Math.floor(now.getTime() / HOUR_MS), pull?.id, pull?.outcome])
+  if (known && known.key === key && (known.until === null || now <= known.until)) return { ...known.order, now: now.toISOString() }
+  const places = listPlacesOfFarm(db, farm.id)
+  const { summary, until } = farmForecast(db, places.map(place => place.id), farm.invented, now)
+  const order = workOutOrder({ ...loadInputs(db, farm, places, now), forecast: summary })
   kept.delete(farm.id)
   if (kept.size >= MOST_KEPT) kept.delete(kept.keys().next().value!)
-  kept.set(farm.id, { key: key(order.forecast), order })
+  kept.set(farm.id, { key, until, order })
   return order
 }
 
@@ -53,14 +55,9 @@ function keptFarms(db: Db): Map<FarmId, Kept> {
   return kept
 }
 
-function freshnessOf({ fetchedAt, status }: ForecastSummary, now: Date): ForecastSummary['status'] {
-  return status === 'none' ? 'none' : freshness(fetchedAt === null ? null : new Date(fetchedAt), now)
-}
-
-function loadInputs(db: Db, farm: Farm, now: Date): FarmInputs {
-  const places = listPlacesOfFarm(db, farm.id)
+function loadInputs(db: Db, farm: Farm, places: PlaceRow[], now: Date): Omit<FarmInputs, 'forecast'> {
   const fields = listFields(db, farm.id)
-  const passTotals = listPassTotals(db, farm.id, seasonStart(now, farm.zone))
+  const passTotals = listPassTotals(db, farm.id, seasonOf(now, farm.zone))
   const wanted = placesWanted(places, farm, fields.map(field => fieldSeason(field, passTotals)))
   return {
     farm,
@@ -72,7 +69,6 @@ function loadInputs(db: Db, farm: Farm, now: Date): FarmInputs {
     passTotals,
     places,
     weather: new Map(wanted.map(place => [place.id, weatherFor(db, place, now, { pastHours: PAST_HOURS, aheadHours: AHEAD_HOURS })])),
-    forecast: forecastSummary(db, places.map(place => place.id), farm.invented, now),
   }
 }
 

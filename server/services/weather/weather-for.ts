@@ -33,7 +33,7 @@ export function weatherFor(db: Db, place: { id: PlaceId, elevationM: number | nu
   const forecastRow = findNewestForecast(db, place.id, 'forecast', at)
   const runsRow = findNewestForecast(db, place.id, 'runs', at)
   if (!forecastRow || !runsRow) return { missing: 'No forecast has come for it yet' }
-  if (freshness(forecastRow.fetchedAt, at) === 'expired' || freshness(runsRow.fetchedAt, at) === 'expired') return { missing: 'Its forecast is too old to work anything out from' }
+  if (freshness(forecastRow, runsRow, at) === 'expired') return { missing: 'Its forecast is too old to work anything out from' }
   const whole = columnsOf(forecastRow, FORECAST_VARIABLES)[0]!
   const past = pastOf(db, place.id, hour, options.pastHours, forecastRow, whole)
   if (!past) return { missing: 'Its past weather has a gap' }

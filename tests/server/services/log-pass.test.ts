@@ -21,7 +21,7 @@ describe('logPass', () => {
 
   const entry = (over: object = {}) => NewPassRecord.parse({ pass: 'plant', areaAc: 40, machineId: 'a-jay', startedAt: '2025-05-06T08:00:00Z', endedAt: '2025-05-06T09:30:00Z', ...over })
   const log = (over: object = {}, fieldId = 'a-0', farm = farmId) => logPass(temporary.db, { id: farm, zone: 'America/Chicago' }, fieldId, person, NOW, entry(over))
-  const done = (fieldId = 'a-0') => sumPassAcres(temporary.db, farmId, fieldId as never, 'plant', new Date('2025-01-01T00:00:00Z'))
+  const done = (fieldId = 'a-0') => sumPassAcres(temporary.db, farmId, fieldId as never, 'plant', { from: new Date('2025-01-01T06:00:00Z'), to: new Date('2026-01-01T06:00:00Z') })
 
   it('keeps acres, machine, times and who wrote them down', () => {
     expect(log()).toMatchObject({ outcome: 'logged', doneBeforeAc: 0, record: { areaAc: 40, machineId: 'a-jay', enteredBy: person, startedAt: new Date('2025-05-06T08:00:00Z') } })
@@ -50,11 +50,20 @@ describe('logPass', () => {
     expect(logAt({ areaAc: 60 })).toMatchObject({ outcome: 'too-many-acres', leftAc: 40 })
   })
 
+  it('counts a late entry to its own season', () => {
+    const lastYear = { startedAt: '2024-05-06T08:00:00Z', endedAt: '2024-05-06T09:30:00Z' }
+    expect(log({ areaAc: 100 })).toMatchObject({ outcome: 'logged', doneBeforeAc: 0 })
+    expect(log({ ...lastYear, areaAc: 80 })).toMatchObject({ outcome: 'logged', doneBeforeAc: 0 })
+    expect(log({ ...lastYear, areaAc: 80 })).toMatchObject({ outcome: 'too-many-acres', leftAc: 20 })
+  })
+
   it.each([
     ['a field that isn’t there', {}, 'z-9', 'no-field'],
     ['a machine that isn’t there', { machineId: 'b-jay' }, 'a-0', 'no-machine'],
     ['a pass that the field doesn’t get', { pass: 'roll' }, 'a-0', 'not-in-chain'],
     ['a time that is still to come', { endedAt: '2025-05-06T12:00:00Z' }, 'a-0', 'in-the-future'],
+    ['a time of another decade', { startedAt: '2015-05-06T08:00:00Z', endedAt: '2015-05-06T09:30:00Z' }, 'a-0', 'too-long-ago'],
+    ['a machine that does another pass', { pass: 'dig' }, 'a-0', 'wrong-machine'],
     ['more acres than are left', { areaAc: 106 }, 'a-0', 'too-many-acres'],
   ])('keeps nothing for %s', (_, over, fieldId, outcome) => {
     expect(log(over, fieldId).outcome).toBe(outcome)
@@ -73,7 +82,11 @@ describe('NewPassRecord', () => {
     [{ areaAc: 0 }, 'Acres must be more than 0.'],
     [{ areaAc: '40' }, 'Enter the acres as a number.'],
     [{ pass: 'plough' }, 'The pass is dig, rocks, plant, roll or spray.'],
-    [{ endedAt: '2025-05-06T07:00:00Z' }, 'The end is before the start.'],
+    [{ endedAt: '2025-05-06T07:00:00Z' }, 'The end is not after the start.'],
+    [{ endedAt: '2025-05-06T08:00:00Z' }, 'The end is not after the start.'],
+    [{ startedAt: '2025-05-03T08:00:00Z' }, 'The start is more than two days before the end. Check the date.'],
+    [{ areaAc: 5e-324 }, 'Acres must be at least 0.01.'],
+    [{ note: 'a\u0000b' }, 'The note holds characters that can\'t be shown.'],
     [{ startedAt: 'yesterday' }, 'The start must be a date and time.'],
   ])('refuses %o in plain words', (over, words) => {
     const parsed = NewPassRecord.safeParse({ pass: 'plant', areaAc: 40, startedAt: '2025-05-06T08:00:00Z', endedAt: '2025-05-06T09:30:00Z', ...over })

@@ -5,7 +5,7 @@ import { countForecasts, findNewestForecast } from '../../../server/db/queries/f
 import { listHours } from '../../../server/db/queries/hourly-weather'
 import { listPlacesInUse } from '../../../server/db/queries/places'
 import { findNewestPull } from '../../../server/db/queries/weather-pulls'
-import { forecastSummary } from '../../../server/services/weather/forecast-summary'
+import { farmForecast } from '../../../server/services/weather/forecast-summary'
 import { pullWeather } from '../../../server/services/weather/pull-weather'
 import { weatherFor } from '../../../server/services/weather/weather-for'
 import type { LocalDay } from '../../../shared/types/ids'
@@ -99,10 +99,10 @@ describe('pullWeather', () => {
     expect(findNewestForecast(temporary.db, place().id, 'forecast', at)!.id).toBe(good)
     expect(temporary.sqlite.prepare('select count(*), sum(rain_mm), sum(temperature_c) from hourly_weather').raw().get()).toEqual(hours)
     expect(findNewestPull(temporary.db)).toMatchObject({ outcome: 'failed', stored: 0 })
-    expect(forecastSummary(temporary.db, [place().id], true, at)).toMatchObject({ status: 'late', fetchedAt: NOW.toISOString(), trouble: expect.stringMatching(/The weather service/) })
+    expect(farmForecast(temporary.db, [place().id], true, at).summary).toMatchObject({ status: 'late', fetchedAt: NOW.toISOString(), trouble: expect.stringMatching(/The weather service/) })
     setTrouble(null)
     await pull(at)
-    expect(forecastSummary(temporary.db, [place().id], true, at)).toMatchObject({ status: 'fresh', trouble: null })
+    expect(farmForecast(temporary.db, [place().id], true, at).summary).toMatchObject({ status: 'fresh', trouble: null })
   })
 
   it('leaves a failing service alone after five failures, and tries it again after five minutes', async () => {
@@ -122,8 +122,8 @@ describe('pullWeather', () => {
     await pull()
     const late = new Date(NOW.getTime() + 25 * HOUR)
     expect(weatherFor(temporary.db, place(), late, { pastHours: 48, aheadHours: 24 })).toEqual({ missing: expect.stringMatching(/too old/) })
-    expect(forecastSummary(temporary.db, [place().id], true, late).status).toBe('expired')
-    expect(forecastSummary(temporary.db, [], true, late).status).toBe('none')
+    expect(farmForecast(temporary.db, [place().id], true, late).summary.status).toBe('expired')
+    expect(farmForecast(temporary.db, [], true, late).summary.status).toBe('none')
   })
 
   it('gives the same answer to the same question', async () => {
