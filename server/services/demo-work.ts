@@ -5,10 +5,11 @@ import type { DbOrTransaction } from '../db/client'
 import { listFarms, updateRevision, type Farm } from '../db/queries/farms'
 import { updateMachinePlace } from '../db/queries/machines'
 import { insertPassRecord } from '../db/queries/pass-records'
+import { insertAudit } from '../db/queries/records'
 import type { App } from './app'
 import { announceChange } from './changes'
 import { groundOrder } from './ground-order/ground-order'
-import type { Job } from './jobs'
+import { othersFirst, type Job } from './jobs'
 
 const HOUR_MS = 3_600_000
 /** Acres under which nobody drives out. */
@@ -23,7 +24,10 @@ export const demoWorkJob: Job = {
   name: 'demo:work',
   dueAt: (_, lastSuccessAt) => lastSuccessAt ? new Date((Math.floor(lastSuccessAt.getTime() / HOUR_MS) + 1) * HOUR_MS) : new Date(0),
   async run(app, at) {
-    for (const farm of listFarms(app.db)) workHour(app, farm, new Date(Math.floor(at.getTime() / HOUR_MS) * HOUR_MS))
+    for (const farm of listFarms(app.db)) {
+      workHour(app, farm, new Date(Math.floor(at.getTime() / HOUR_MS) * HOUR_MS))
+      await othersFirst()
+    }
   },
 }
 
@@ -49,10 +53,11 @@ function workRow(tx: DbOrTransaction, farm: Farm, row: GroundRow, machines: { id
       const rate = machines.find(machine => machine.id === bar.machineId)?.rateAcPerHour ?? 0
       const areaAc = Math.min(leftAc, (endedAt - startedAt) / HOUR_MS * rate)
       if (!(areaAc > LEAST_AC)) continue
-      insertPassRecord(tx, {
+      const record = insertPassRecord(tx, {
         id: `demo-${row.id}-${pass}-${startedAt}` as PassRecordId, farmId: farm.id, fieldId: row.id as FieldId, machineId: bar.machineId, pass, areaAc,
         startedAt: new Date(startedAt), endedAt: new Date(endedAt), note: 'Invented: the demo\'s crew.', enteredAt: to,
       })
+      insertAudit(tx, { farmId: farm.id, personId: null, at: to, action: 'logged', subject: 'pass', subjectId: record.id, before: { doneAc: row.areaAc - leftAc }, after: record })
       updateMachinePlace(tx, farm.id, bar.machineId, row.id)
       leftAc -= areaAc
       worked = true

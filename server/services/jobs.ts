@@ -1,7 +1,8 @@
 import { randomUUID } from 'node:crypto'
-import type { Db } from '../db/client'
-import { claimJob, findJob, releaseJob } from '../db/queries/jobs'
+import { keepDemoClock } from '../db/queries/demo-clock'
+import { claimJob, findJob, releaseJob, renewJob } from '../db/queries/jobs'
 import type { App } from './app'
+import type { DemoClock } from './clock'
 import { log } from './log'
 
 /** Work that falls due. It is only ever asked what is due, so that a stop of hours is caught up. */
@@ -13,7 +14,9 @@ export interface Job {
   run: (app: App, at: Date) => Promise<void>
 }
 
-const LEASE_MS = 5 * 60_000
+/** Who died over a job leaves it locked for so long; who lives renews its lease well before. */
+const LEASE_MS = 60_000
+const RENEW_MS = 15_000
 const RETRY_MS = 5 * 60_000
 const jobs: Job[] = []
 const worker = randomUUID()
@@ -49,11 +52,23 @@ export async function runJobsUntil(app: App, until: Date): Promise<void> {
     while (!stopping) {
       const next = jobs.map(job => ({ job, at: dueAt(app, job) })).sort((a, b) => a.at.getTime() - b.at.getTime())[0]
       if (!next || next.at > until) break
-      if (next.at > clock.now()) clock.moveTo(next.at)
+      if (next.at > clock.now()) moveClock(app, clock, next.at)
       await runJob(app, next.job, clock.now())
+      await othersFirst()
     }
-    if (!stopping && until > clock.now()) clock.moveTo(until)
+    if (!stopping && until > clock.now()) moveClock(app, clock, until)
   })
+}
+
+/** The time is kept before anything is done in it, so that whatever ends the process can't set the demo back. */
+function moveClock(app: App, clock: DemoClock, to: Date): void {
+  clock.moveTo(to)
+  keepDemoClock(app.db, to)
+}
+
+/** Lets whatever else waits have its turn: a move of a day is dozens of jobs in a row. */
+export function othersFirst(): Promise<void> {
+  return new Promise(resolve => setImmediate(resolve))
 }
 
 /** Starts no job any more, and waits for the one that runs. */
@@ -81,7 +96,9 @@ function dueAt(app: App, job: Job): Date {
 
 /** Holds the job's lock while it runs, so that two processes on one database do the work once. */
 async function runJob(app: App, job: Job, at: Date): Promise<void> {
-  if (!claimJob(app.db, job.name, worker, at, new Date(at.getTime() + LEASE_MS))) return
+  const leaseEnd = () => new Date(app.clock.now().getTime() + LEASE_MS)
+  if (!claimJob(app.db, job.name, worker, at, leaseEnd())) return
+  const renewing = setInterval(() => renewJob(app.db, job.name, worker, leaseEnd()), RENEW_MS)
   let failure: string | null = null
   try {
     await job.run(app, at)
@@ -90,11 +107,10 @@ async function runJob(app: App, job: Job, at: Date): Promise<void> {
     failure = error instanceof Error ? error.message : String(error)
     log('warn', 'A job failed.', { job: job.name, failure })
   }
-  finish(app.db, job.name, at, failure)
-}
-
-function finish(db: Db, name: string, at: Date, failure: string | null): void {
-  releaseJob(db, name, failure === null
+  finally {
+    clearInterval(renewing)
+  }
+  releaseJob(app.db, job.name, worker, failure === null
     ? { lastSuccessAt: at, lastFailure: null, retryAt: null }
     : { lastFailure: failure, retryAt: new Date(at.getTime() + RETRY_MS) })
 }

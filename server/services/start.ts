@@ -1,6 +1,7 @@
 import { join } from 'node:path'
-import { openDatabase, type Migration } from '../db/client'
+import { openDatabase, type Db, type Migration } from '../db/client'
 import { findDemoClock, keepDemoClock } from '../db/queries/demo-clock'
+import { findLastSuccess } from '../db/queries/jobs'
 import { countDemoPeople } from '../db/queries/people'
 import { setApp } from './app'
 import { createDemoClock, DEMO_START, systemClock } from './clock'
@@ -26,7 +27,7 @@ export function startApp(env: Record<string, string | undefined>, migrations: Mi
     close()
     throw new Error('Sillion can\'t start: the database holds the demo\'s people, whose password anybody can read. Use a database of your own (DATA_DIR).')
   }
-  const demoClock = settings.demo ? createDemoClock(findDemoClock(db) ?? DEMO_START) : null
+  const demoClock = settings.demo ? createDemoClock(demoTime(db)) : null
   const clock = demoClock ?? systemClock
   shared[CLOCK] = clock.now
   setApp({ settings, db, sqlite, clock, demoClock })
@@ -38,4 +39,9 @@ export function startApp(env: Record<string, string | undefined>, migrations: Mi
     sqlite.pragma('wal_checkpoint(TRUNCATE)')
     close()
   }
+}
+
+/** Where the demo was left; never before work that is done already, or nothing would fall due for long. */
+function demoTime(db: Db): Date {
+  return new Date(Math.max(Number(findDemoClock(db) ?? DEMO_START), Number(findLastSuccess(db) ?? 0)))
 }

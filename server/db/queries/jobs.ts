@@ -1,4 +1,4 @@
-import { eq } from 'drizzle-orm'
+import { and, eq, max } from 'drizzle-orm'
 import type { Db, DbOrTransaction } from '../client'
 import { jobs } from '../schema'
 
@@ -17,6 +17,17 @@ export function claimJob(db: Db, name: string, worker: string, now: Date, locked
   }, { behavior: 'immediate' })
 }
 
-export function releaseJob(db: DbOrTransaction, name: string, result: { lastSuccessAt?: Date, lastFailure: string | null, retryAt: Date | null }): void {
-  db.update(jobs).set({ lockedBy: null, lockedUntil: null, ...result }).where(eq(jobs.name, name)).run()
+/** Moves the end of the lease of whoever holds the job; does nothing for anybody else. */
+export function renewJob(db: DbOrTransaction, name: string, worker: string, lockedUntil: Date): void {
+  db.update(jobs).set({ lockedUntil }).where(and(eq(jobs.name, name), eq(jobs.lockedBy, worker))).run()
+}
+
+/** Lets go of a job and notes what came of it; does nothing when another worker has taken it over. */
+export function releaseJob(db: DbOrTransaction, name: string, worker: string, result: { lastSuccessAt?: Date, lastFailure: string | null, retryAt: Date | null }): void {
+  db.update(jobs).set({ lockedBy: null, lockedUntil: null, ...result }).where(and(eq(jobs.name, name), eq(jobs.lockedBy, worker))).run()
+}
+
+/** When any job last went well. */
+export function findLastSuccess(db: DbOrTransaction): Date | null {
+  return db.select({ at: max(jobs.lastSuccessAt) }).from(jobs).get()?.at ?? null
 }

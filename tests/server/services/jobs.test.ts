@@ -1,5 +1,6 @@
 import { afterEach, beforeEach, describe, expect, it } from 'vitest'
-import { claimJob, findJob } from '../../../server/db/queries/jobs'
+import { findDemoClock } from '../../../server/db/queries/demo-clock'
+import { claimJob, findJob, releaseJob, renewJob } from '../../../server/db/queries/jobs'
 import type { App } from '../../../server/services/app'
 import { createDemoClock } from '../../../server/services/clock'
 import { registerJob, runDueJobs, runJobsUntil } from '../../../server/services/jobs'
@@ -70,6 +71,31 @@ describe('jobs', () => {
     app.demoClock!.moveTo(new Date(NOW.getTime() + 61_000))
     await runDueJobs(app)
     expect(ran.map(([name]) => name)).toContain('one')
+  })
+
+  it('stay locked when one who lost the lease lets go of them late', () => {
+    const until = new Date(NOW.getTime() + 60_000)
+    claimJob(app.db, 'one', 'the slow', NOW, until)
+    claimJob(app.db, 'one', 'the next', new Date(until.getTime() + 1), new Date(until.getTime() + 60_000))
+    releaseJob(app.db, 'one', 'the slow', { lastSuccessAt: NOW, lastFailure: null, retryAt: null })
+    renewJob(app.db, 'one', 'the slow', NOW)
+    expect(findJob(app.db, 'one')).toMatchObject({ lockedBy: 'the next', lockedUntil: new Date(until.getTime() + 60_000), lastSuccessAt: null })
+  })
+
+  it('keep the time before they do anything, so that a killed server does not go back', async () => {
+    await runJobsUntil(app, new Date(NOW.getTime() + 30 * 60_000))
+    expect(findDemoClock(app.db)).toEqual(new Date(NOW.getTime() + 30 * 60_000))
+  })
+
+  it('let others have their turn in between', async () => {
+    let turns = 0
+    const moving = runJobsUntil(app, new Date(NOW.getTime() + 3 * HOUR)).then(() => turns = -turns)
+    while (turns >= 0 && turns < 1000) {
+      await new Promise(resolve => setImmediate(resolve))
+      turns++
+    }
+    await moving
+    expect(turns).toBeLessThan(-4)
   })
 
   it('run once when the tick meets a move of the clock', async () => {
