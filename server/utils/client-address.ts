@@ -16,17 +16,24 @@ export function clientAddress(event: H3Event): string {
 /**
  * The same, from its parts. Of an IPv6 address only the network is told, since whoever has one address there has all.
  *
+ * What a trusted proxy wrote and we can't read is never skipped, else what the caller wrote before it would be believed:
+ * the nearest address that we could read stands for the caller then.
+ *
  * @returns an IPv4 address, or an IPv6 network as `2001:db8:0:1::/64`
  */
 export function addressBehindProxies(socketAddress: string, forwardedFor: string | undefined, trusted: string[]): string {
   const trustedSet = new Set(trusted.map(plain))
-  const chain = [...(forwardedFor ?? '').split(',').map(plain).filter(part => isIP(part) !== 0), plain(socketAddress)]
-  while (chain.length > 1 && trustedSet.has(chain.at(-1)!)) chain.pop()
-  return networkOf(chain.at(-1)!)
+  let address = plain(socketAddress)
+  for (const written of (forwardedFor ?? '').split(',').map(plain).reverse()) {
+    if (!trustedSet.has(address) || isIP(written) === 0) break
+    address = written
+  }
+  return networkOf(address)
 }
 
+/** Without port, brackets, interface and IPv6 clothes. */
 function plain(address: string): string {
-  return address.trim().replace(/^::ffff:(?=\d+\.)/i, '').replace(/%.*$/, '').toLowerCase()
+  return address.trim().replace(/^(\d+\.\d+\.\d+\.\d+):\d+$/, '$1').replace(/^\[(.*)\](:\d+)?$/, '$1').replace(/^::ffff:(?=\d+\.)/i, '').replace(/%.*$/, '').toLowerCase()
 }
 
 function networkOf(address: string): string {
