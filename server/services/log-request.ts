@@ -5,12 +5,11 @@ import { log } from './log'
 export function logRequest(event: H3Event): void {
   const startedAt = performance.now()
   event.node.res.once('close', () => {
-    const { requestId, personId, farmId, matchedRoute } = event.context
+    const { requestId, personId, farmId } = event.context
     log('info', 'request', {
       requestId,
       method: event.method,
-      // The pattern: what stands in a path is nobody's business in a log.
-      route: (matchedRoute as { path?: string } | undefined)?.path ?? 'none',
+      route: routeOf(event),
       status: event.node.res.statusCode,
       ms: Math.round(performance.now() - startedAt),
       ...(personId ? { person: personId } : {}),
@@ -18,4 +17,9 @@ export function logRequest(event: H3Event): void {
       ...(event.node.res.writableFinished ? {} : { cutOff: true }),
     })
   })
+}
+
+/** The pattern of the route that answers: what stands in a path itself is nobody's business in a log. */
+export function routeOf(event: H3Event): string {
+  return (event.context.matchedRoute as { path?: string } | undefined)?.path ?? 'none'
 }

@@ -2,6 +2,7 @@ import { getResponseStatus, setResponseHeader, setResponseStatus, type H3Event }
 import type { FarmId, PersonId } from '../../shared/types/ids'
 import type { Permission } from '../../shared/utils/permissions'
 import { log } from '../services/log'
+import { routeOf } from '../services/log-request'
 
 /** What a handler asked before it answered: nothing of anybody, a signed-in person, or a permission on the farm. */
 export type Asked = 'nothing' | 'person' | Permission
@@ -30,7 +31,7 @@ export function markAsked(event: H3Event, asked: Asked): void {
 export function withholdUnasked(event: H3Event, response: { body?: unknown }): void {
   const path = event.path.split('?')[0]!
   if (!path.startsWith('/api/') || mayAnswer(path, event.context.asked)) return
-  log('error', 'A route answered without asking for a permission.', { requestId: event.context.requestId, route: path, status: getResponseStatus(event) })
+  log('error', 'A route answered without asking for a permission.', { requestId: event.context.requestId, route: routeOf(event), status: getResponseStatus(event) })
   setResponseStatus(event, 500)
   setResponseHeader(event, 'content-type', 'application/json')
   response.body = { error: { code: 'internal', message: 'Something went wrong on our side.', requestId: event.context.requestId ?? '' } }

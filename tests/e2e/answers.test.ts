@@ -15,9 +15,9 @@ describe('the server’s answers', () => {
   }
 
   it.each([
-    ['DELETE', ORDER, 'GET'],
-    ['HEAD', ORDER, 'GET'],
-    ['OPTIONS', '/api/auth/me', 'GET'],
+    ['DELETE', ORDER, 'GET, HEAD'],
+    ['HEAD', '/api/farms/brindle-marsh/changes', 'GET'],
+    ['OPTIONS', '/api/auth/me', 'GET, HEAD'],
     ['PUT', '/api/auth/sign-in', 'POST'],
     ['GET', '/api/auth/sign-out/', 'POST'],
     ['POST', '/sign-in', 'GET, HEAD'],
@@ -27,11 +27,33 @@ describe('the server’s answers', () => {
     expect([answer.status, answer.headers.get('allow')]).toEqual([405, allowed])
   })
 
-  it.each([['GET', '/api/nothing'], ['POST', '/api/nothing'], ['GET', '/api/_auth/session'], ['DELETE', '/api/_auth/session'], ['GET', '/nothing'], ['GET', '/_nitro/tasks'], ['GET', '/__nuxt_error?statusCode=500']])('say to %s %s that nothing is there, in the one shape', async (method, path) => {
+  it.each([['GET', '/api/nothing'], ['POST', '/api/nothing'], ['GET', '/api/_auth/session'], ['DELETE', '/api/_auth/session'], ['GET', '/nothing'], ['GET', '/_nitro/tasks'], ['GET', '/_nuxt/nothing.js'], ['GET', '/__nuxt_error?statusCode=500']])('say to %s %s that nothing is there, in the one shape', async (method, path) => {
     const answer = await send(method, path)
     expect(answer.status).toBe(404)
-    if (path.startsWith('/__nuxt_error')) return
     expect(await answer.json()).toEqual({ error: { code: 'not-found', message: 'There is nothing here.', requestId: answer.headers.get('x-request-id') } })
+  })
+
+  it('have the same head, and nothing else, for HEAD', async () => {
+    const cookie = await signIn()
+    const [head, get] = [await send('HEAD', ORDER, { cookie }), await send('GET', ORDER, { cookie })]
+    expect([head.status, head.headers.get('content-type'), await head.text()]).toEqual([200, get.headers.get('content-type'), ''])
+    expect((await send('HEAD', ORDER)).status).toBe(401)
+    expect((await send('HEAD', '/api/health/live')).status).toBe(200)
+  })
+
+  it('give no session to a seal that comes outside the cookie', async () => {
+    const seal = decodeURIComponent((await signIn()).split('=')[1]!)
+    expect((await send('GET', ORDER, { 'cookie': 'sillion=none', 'x-sillion-session': seal })).status).toBe(401)
+  })
+
+  it('serve others while the demo’s clock moves, and refuse a second move', async () => {
+    const cookie = await signIn()
+    const move = () => send('POST', '/api/farms/brindle-marsh/demo-clock/moves', { cookie, 'content-type': 'application/json' }, '{"hours":6}')
+    const [first, second] = [move(), move()]
+    let served = 0
+    while (await Promise.race([Promise.all([first, second]).then(() => false), send('GET', '/api/health/live').then(() => true)])) served++
+    expect([(await first).status, (await second).status].sort()).toEqual([200, 409])
+    expect(served).toBeGreaterThan(3)
   })
 
   it('draw a page for a person who looks for one that is not there', async () => {
