@@ -21,8 +21,8 @@ const PLACES_PER_CALL = { forecast: 50, runs: 4 }
 const MOST_HOURS_OFF = 100 * 24
 const LEAST_HOURS_AHEAD = 72
 
-export function createOpenMeteo(settings: Settings['weather'], now: () => Date, caller: Caller): WeatherGateway {
-  const breaker = new Breaker(now)
+export function createOpenMeteo(settings: Settings['weather'], caller: Caller): WeatherGateway {
+  const breaker = new Breaker(caller.now)
   const get = (url: string) => breaker.call(() => fetchJson(settings.apiKey ? `${url}&apikey=${encodeURIComponent(settings.apiKey)}` : url, caller))
 
   async function ask(base: string, places: AskedPlace[], variables: readonly WeatherVariable[], extra: string, chunk: number): Promise<Outcome<PlaceAnswer[]>> {
@@ -31,7 +31,7 @@ export function createOpenMeteo(settings: Settings['weather'], now: () => Date, 
       const some = places.slice(from, from + chunk)
       const outcome = await get(`${base}?${query(some, variables)}${extra}`)
       if (!outcome.ok) return outcome
-      const read = readAnswer(outcome.value, some, variables, now())
+      const read = readAnswer(outcome.value, some, variables, caller.now())
       if (!read.ok) return read
       answers.push(...read.value)
     }

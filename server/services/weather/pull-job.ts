@@ -24,7 +24,7 @@ export const weatherPullJob: Job = {
     const { weather } = app.settings
     // The demo's time is invented, so there is no sense in waiting in real time before another try.
     const sleep = (ms: number) => new Promise<void>(resolve => setTimeout(resolve, app.demoClock ? 0 : ms))
-    gateway ??= createOpenMeteo(weather, app.clock.now, { random: Math.random, sleep, patienceMs: PATIENCE_MS })
+    gateway ??= createOpenMeteo(weather, { now: app.clock.now, random: Math.random, sleep, patienceMs: PATIENCE_MS })
     await pullWeather({ db: app.db, now: at, gateway, model: { forecast: weather.forecastModel, runs: weather.runsModel } })
     for (const farm of listFarms(app.db)) announceChange(farm.id)
   },

@@ -18,7 +18,7 @@ export function fakeService() {
       now = instant
       ;(globalThis as Record<symbol, unknown>)[Symbol.for('sillion.clock')] = () => instant
     },
-    gateway: (patienceMs = 10_000) => createOpenMeteo(settings, () => now, { random: () => 0.5, sleep: ms => Promise.resolve(void slept.push(ms)), patienceMs }),
+    gateway: (patienceMs = 10_000) => createOpenMeteo(settings, { now: () => now, random: () => 0.5, sleep: ms => Promise.resolve(void slept.push(ms)), patienceMs }),
     calls: () => calls,
     slept,
     model: { forecast: settings.forecastModel, runs: settings.runsModel },
