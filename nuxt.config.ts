@@ -3,6 +3,8 @@ import { migrationsModule } from './server/db/migrations-module'
 
 export default defineNuxtConfig({
   modules: ['@nuxt/eslint', '@nuxtjs/tailwindcss', '@pinia/nuxt', 'nuxt-auth-utils'],
+  // npm run dev answers for the outside services itself; a built server is given the fakes when it starts, or has none.
+  $development: { nitro: { plugins: ['~~/mocks/nitro-plugin.ts'] } },
   components: [{ path: '~/components', pathPrefix: false }],
   devtools: { enabled: false },
   app: {
@@ -22,6 +24,8 @@ export default defineNuxtConfig({
       name: '__Host-sillion',
       password: '',
       maxAge: 90 * 24 * 3600,
+      // The seal travels in the cookie alone, where scripts can't reach it.
+      sessionHeader: false,
       cookie: { sameSite: 'lax', secure: true, httpOnly: true, path: '/' },
     },
   },
@@ -40,8 +44,6 @@ export default defineNuxtConfig({
   },
   features: { inlineStyles: false },
   compatibilityDate: '2025-05-06',
-  // npm run dev answers for the outside services itself; a built server is given the fakes when it starts, or has none.
-  $development: { nitro: { plugins: ['~~/mocks/nitro-plugin.ts'] } },
   nitro: {
     preset: 'node-server',
     compressPublicAssets: true,

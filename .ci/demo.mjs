@@ -18,7 +18,7 @@ mkdirSync(dataDir, { recursive: true })
 const env = demoEnv({ port, dataDir, secret: demoSecret() })
 await step('Setting up the demo farms', async () => {
   const { code, output } = await run('node', ['.ci/run-typescript.mjs', 'mocks/demo/seed.ts'], { quiet: true, env })
-  if (code !== 0) stop(`${output.slice(-2000)}\nThe demo farms could not be set up. Remove ${dataDir} and run the command again.`)
+  if (code !== 0) stop(`${output.slice(0, 1500)}\nThe demo farms could not be set up. Remove ${dataDir} and run the command again.`)
 })
 const server = spawn('node', ['--import', './mocks/register.mjs', '.output/server/index.mjs'], {
   cwd: root,

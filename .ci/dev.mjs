@@ -16,7 +16,7 @@ const env = {
 await installWhenNeeded()
 mkdirSync(env.DATA_DIR, { recursive: true })
 const { code, output } = await run('node', ['.ci/run-typescript.mjs', 'mocks/demo/seed.ts'], { quiet: true, env })
-if (code !== 0) stop(`${output.slice(-2000)}\nThe demo farms could not be set up. Remove ${env.DATA_DIR} and run the command again.`)
+if (code !== 0) stop(`${output.slice(0, 1500)}\nThe demo farms could not be set up. Remove ${env.DATA_DIR} and run the command again.`)
 spawn('npx', ['nuxt', 'dev', '--port', port], {
   cwd: root,
   stdio: 'inherit',

@@ -9,6 +9,8 @@ export async function importTypescript(file) {
   const { module } = await runnerImport(pathToFileURL(resolve(file)).pathname, {
     configFile: false,
     logLevel: 'error',
+    // Nuxt's own tsconfig says nothing that a run needs, and is not there before Nuxt has prepared.
+    esbuild: { tsconfigRaw: {} },
     resolve: { alias: { '#shared': fileURLToPath(new URL('../shared', import.meta.url)) } },
   })
   return module

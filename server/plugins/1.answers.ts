@@ -7,8 +7,13 @@ const brotli = promisify(brotliCompress)
 const deflate = promisify(gzip)
 const LEAST_BYTES = 1024
 
-/** What every answer goes through on its way out. */
+/** What every request is given on its way in, and every answer goes through on its way out. */
 export default defineNitroPlugin((nitro) => {
+  nitro.hooks.hook('request', (event) => {
+    // Settings don't change while it runs; without this each request reads the whole environment anew.
+    const context = event.context as { nitro?: { runtimeConfig?: unknown } }
+    context.nitro = { ...context.nitro, runtimeConfig: useRuntimeConfig() }
+  })
   nitro.hooks.hook('render:html', (html, { event }) => {
     const nonce = event.context.nonce as string | undefined
     if (!nonce) return

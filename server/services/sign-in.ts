@@ -2,6 +2,7 @@ import { createHash, randomBytes } from 'node:crypto'
 import type { PersonId } from '../../shared/types/ids'
 import type { Db } from '../db/client'
 import { findActivePerson, findPersonByEmail, updatePasswordHash, type Person } from '../db/queries/people'
+import { insertAudit } from '../db/queries/records'
 import {
   countTries, deleteExpiredSessions, deleteOldTries, deleteTries, findOpenSession, insertSession, insertTry, knowsAddress, updateSessionEnded, updateSessionSeen,
 } from '../db/queries/sessions'
@@ -47,10 +48,14 @@ export async function signIn(db: Db, now: Date, attempt: { email: string, passwo
   deleteOldTries(db, new Date(now.getTime() - DAY))
   const right = await isPassword(attempt.password, person?.passwordHash ?? NOBODYS_HASH)
   if (!right || !person || person.disabledAt) return { outcome: 'refused' }
-  if (isWeakHash(person.passwordHash)) updatePasswordHash(db, person.id, await hashPassword(attempt.password))
+  const better = isWeakHash(person.passwordHash) ? await hashPassword(attempt.password) : null
   const sessionId = randomBytes(32).toString('base64url')
   db.transaction((tx) => {
     deleteTries(tx, accountHash, attempt.address)
+    if (better) {
+      updatePasswordHash(tx, person.id, better)
+      insertAudit(tx, { personId: person.id, at: now, action: 'hashed-anew', subject: 'password', subjectId: person.id })
+    }
     deleteExpiredSessions(tx, now)
     insertSession(tx, {
       idHash: sha256(sessionId), personId: person.id, address: attempt.address, createdAt: now, lastSeenAt: now, expiresAt: new Date(now.getTime() + ABSOLUTE_MS),

@@ -26,7 +26,7 @@ export const idempotencyKeys = sqliteTable('idempotency_keys', {
   status: integer().notNull(),
   body: text().notNull(),
   createdAt: integer({ mode: 'timestamp_ms' }).notNull(),
-}, t => [primaryKey({ columns: [t.farmId, t.personId, t.key] })])
+}, t => [primaryKey({ columns: [t.farmId, t.personId, t.key] }), index('idempotency_keys_by_age').on(t.createdAt)])
 
 /** One row a job: who runs it until when, and when it last went well. */
 export const jobs = sqliteTable('jobs', {

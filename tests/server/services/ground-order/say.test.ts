@@ -12,7 +12,7 @@ describe('sayFor', () => {
     [6.7, '11:45 am'],
     [7, 'noon'],
     [9, '2 pm'],
-    [19, 'Wed midnight'],
+    [19, 'Tue/Wed midnight'],
     [29, 'Wed 10 am'],
     [58, 'Thu 3 pm'],
   ])('writes hour %d as %s', (hour, words) => {

@@ -1,0 +1,1 @@
+CREATE INDEX `idempotency_keys_by_age` ON `idempotency_keys` (`created_at`);
