@@ -29,6 +29,11 @@ export function roomAfter(axis: TimeAxis, end: string, next: string | null, rain
   return round(Math.min(...stops) - xOf(axis, end))
 }
 
+/** Width that a label on or beside a bar needs, px. */
+export function widthOfWords(words: string): number {
+  return words.length * 5.6 + 8
+}
+
 /** Tenths of a pixel keep the page small and the server's drawing equal to the browser's. */
 export function round(value: number): number {
   return Math.round(value * 10) / 10
