@@ -12,6 +12,7 @@ export interface Assignment {
   bookedHours: Float64Array
 }
 
+/** Nobody assigned to anything yet. */
 export function emptyAssignment(problem: PlanProblem): Assignment {
   return {
     sequences: problem.machines.map(() => []),

@@ -25,6 +25,7 @@ export interface Timeline {
 /** Pieces per node to start with; more are made when a run needs them. */
 const ROOM_PER_NODE = 8
 
+/** An empty timeline for a number of fields, written anew for each run. */
 export function createTimeline(fields: number): Timeline {
   const nodes = fields * PASS_COUNT
   const room = Math.max(1, nodes * ROOM_PER_NODE)
