@@ -1,4 +1,4 @@
 /** Where to go after signing in: one of our own pages by its pattern, never an address that somebody handed over. */
 export function safeNext(next: unknown): string {
-  return typeof next === 'string' && /^\/[a-z0-9-]+\/today$/.test(next) ? next : '/'
+  return typeof next === 'string' && /^\/[a-z0-9-]+\/(today|figures)$/.test(next) ? next : '/'
 }

@@ -16,10 +16,10 @@ import { yieldShare } from '../crop/yield-share'
 import { check, type Figure } from './figure'
 
 const AGRONOMIST = 'The agronomist and the insurer decide; this is arithmetic on published tables.'
-const CROP = 'crop.md'
+const CROP = 'method notes on crops,'
 const MAX = [52, 58, 63, 49, 45, 55, 61, 66, 70, 74, 68, 57, 50, 54, 62, 69, 75, 81, 88, 92, 84, 72, 64, 60, 67, 73, 78, 80, 71, 66]
 const MIN = [31, 35, 41, 38, 33, 29, 36, 43, 48, 50, 52, 44, 37, 34, 39, 45, 50, 55, 61, 66, 63, 54, 46, 40, 42, 49, 55, 58, 53, 47]
-/** The worked season of crop.md 1.5: planted 4 May, counted from 5 May. */
+/** The worked season of method notes on crops, 1.5: planted 4 May, counted from 5 May. */
 const SEASON = MAX.map((max, i) => ({ day: dayAfter('2025-05-05', i), max, min: MIN[i]! }))
 const through = (day: string) => SEASON.filter(each => each.day <= `2025-${day}`)
 const sums = (rule: Parameters<typeof sumDegreeDays>[1]) => ['05-07', '05-15', '05-23'].map(day => sumDegreeDays(through(day), rule).sum)
@@ -135,7 +135,7 @@ export const CROP_FIGURES: readonly Figure[] = [
     checks: [
       check('planted 4 May, label 3 days, up from 22 May', '2025-05-07', () => sprayBy('2025-05-04', 3, '2025-05-22')!.day, `${CROP} 7.2`), check('what sets it', 'label', () => sprayBy('2025-05-04', 3, '2025-05-22')!.by, `${CROP} 7.2`),
       check('400 ac at 46.1 ac/h, 8 h, half the days', 2.2, () => backlogDays(400, 46.1, 8, 0.5), `${CROP} 7.2`, 0.05),
-      ...([[19.6, 'activated'], [0, 'not-activated'], [35.6, 'activated'], [3.3, 'not-activated'], [11.4, 'partial'], [43, 'activated']] as const).map(([mm, want]) => check(`${mm} mm in a week`, want, () => activation(Array(7).fill(mm / 7)).status, 'Seattle record, spray.md 11')),
+      ...([[19.6, 'activated'], [0, 'not-activated'], [35.6, 'activated'], [3.3, 'not-activated'], [11.4, 'partial'], [43, 'activated']] as const).map(([mm, want]) => check(`${mm} mm in a week`, want, () => activation(Array(7).fill(mm / 7)).status, 'Seattle record, method notes on spraying, 11')),
     ],
     unknown: 'What the soil held before, and the product: some need an inch.', usualError: 'Labels and advice differ by half an inch.', caution: 'The label is the law.',
   },

@@ -15,12 +15,12 @@ const onsets = () => RUNS.map(run => rainOnset(Float64Array.from(run), 6))
 const hourNumber = (index: number) => index === Infinity ? 'none' : index + 1
 const ones = (chance: number, happened: boolean) => [{ chance, happened }]
 const MIXED = [{ chance: 0.2, happened: false }, { chance: 0.2, happened: true }, { chance: 0.8, happened: true }, { chance: 0.8, happened: true }]
-const S8 = 'spray.md 8'
+const S8 = 'method notes on spraying, 8'
 
 export const RAIN_FIGURES: readonly Figure[] = [
   {
     id: 'rain-started', subject: 'rain', name: 'When rain starts, from hourly chances', meaning: 'Hours of rain hang together, so chances of single hours must not be multiplied.',
-    equation: 'S(t) = S(t−1)·P00/q(t−1), P00 = q₋q + ρ√(p₋q₋pq), clipped', sources: ['first-order Markov chain, spray.md 8.2; NBM: Huntemann & Ruth 2017'],
+    equation: 'S(t) = S(t−1)·P00/q(t−1), P00 = q₋q + ρ√(p₋q₋pq), clipped', sources: ['first-order Markov chain, method notes on spraying, 8.2; NBM: Huntemann & Ruth 2017'],
     covers: ['weather/rain-chance#rainStartedBy', 'weather/rain-chance#hourReaching', 'weather/rain-chance#chanceOfAmount', 'weather/rain-chance#areaChance'],
     checks: [
       ...rows('independent', [0.05, 0.145, 0.4015, 0.7007, 0.8803, 0.9282], () => rainStartedBy(CHANCES, 0).independent, `${S8}.2, table`),
@@ -34,14 +34,14 @@ export const RAIN_FIGURES: readonly Figure[] = [
       check('9 in 10', 'not within', () => hourReaching(rainStartedBy(CHANCES, 0.6).persistent, 0.9) ?? 'not within', `${S8}.2`),
       check('chance of 0.1 in, chance 0.6, mean 1.8 mm', 0.2573, () => chanceOfAmount(0.6, 1.8, 2.54), `${S8}.3`, 5e-5),
       check('chance of 0.01 in', 0.5513, () => chanceOfAmount(0.6, 1.8, 0.254), `${S8}.3`, 5e-5),
-      check('chance of 1 in, mean 20 mm', 0.28, () => chanceOfAmount(0.6, 20, 25.4), 'spray.md 4.4', 5e-5),
+      check('chance of 1 in, mean 20 mm', 0.28, () => chanceOfAmount(0.6, 20, 25.4), 'method notes on spraying, 4.4', 5e-5),
       check('confidence 0.5 over 0.8 of the area', 0.4, () => areaChance(0.5, 0.8), 'US National Weather Service', 1e-12),
     ],
     unknown: 'The true persistence, which changes with the kind of rain.', usualError: 'Wide: runs of a forecast are used wherever they are to be had.',
   },
   {
     id: 'rain-line', subject: 'rain', name: 'The rain line', meaning: 'The hour by which half of the forecast’s runs have brought a tenth of an inch; around it, when 1 and 9 in 10 have.',
-    equation: 'first hour with a running sum of at least 2.54 mm, by rank over the runs', sources: ['spray.md 8.4'], covers: ['plan/rain-onset#rainOnset', 'plan/chance#quantileByRank', 'plan/chance#plottingPosition'],
+    equation: 'first hour with a running sum of at least 2.54 mm, by rank over the runs', sources: ['method notes on spraying, 8.4'], covers: ['plan/rain-onset#rainOnset', 'plan/chance#quantileByRank', 'plan/chance#plottingPosition'],
     checks: [
       ...[5, 6, Infinity, 3, 5, 4, 5, 5, Infinity, 4].map((want, i) => check(`onset of run ${i + 1}`, want === Infinity ? 'none' : want, () => hourNumber(onsets()[i]!), `${S8}.4`)),
       check('1 in 10', 3, () => hourNumber(quantileByRank(onsets(), 0.1)), `${S8}.4`),

@@ -10,7 +10,7 @@ import { boomWind, windByLogLaw, windByPowerLaw } from '../weather/wind-profile'
 import { check, type Figure } from './figure'
 
 const KNOT = 1852 / 3600
-const SPRAY = 'spray.md'
+const SPRAY = 'method notes on spraying,'
 const LABEL = 'The label is the law, and the wind is judged at the field: this only plans.'
 const grass = { roughnessM: 0.03 }
 const soil = { roughnessM: 0.01 }
@@ -29,9 +29,9 @@ export const WEATHER_FIGURES: readonly Figure[] = [
     meaning: 'Thin air dries a wet thermometer faster, so a farm’s height above the sea is taken into account.',
     equation: 'P = 101.3·((293 − 0.0065 z)/293)^5.26', sources: ['FAO-56 eq 7'], covers: ['weather/humidity#airPressureKpa', 'weather/humidity#saturationVapourPressure', 'weather/humidity#vapourPressureFromWetBulb'],
     checks: [
-      check('1,800 m', 81.76, () => airPressureKpa(1800), 'NCL documentation of FAO-56 eq 7; spray.md 3.3', 0.01),
+      check('1,800 m', 81.76, () => airPressureKpa(1800), 'NCL documentation of FAO-56 eq 7; method notes on spraying, 3.3', 0.01),
       check('1,200 m', 87.9, () => airPressureKpa(1200), 'FAO-56 example 4', 0.05),
-      check('saturation at 15 °C, kPa', 1.70535, () => saturationVapourPressure(15), 'NCL satvpr_tdew_fao56; spray.md 3.3', 1e-4),
+      check('saturation at 15 °C, kPa', 1.70535, () => saturationVapourPressure(15), 'NCL satvpr_tdew_fao56; method notes on spraying, 3.3', 1e-4),
       check('25.6 °C dry, 19.5 °C wet, 1,200 m: vapour pressure, kPa', 1.91, () => vapourPressureFromWetBulb(25.6, 19.5, airPressureKpa(1200), 0.000662), 'FAO-56 example 4', 0.005),
     ],
     unknown: 'The weather’s own highs and lows of pressure.', usualError: 'About 1 % of the pressure.',
@@ -82,7 +82,7 @@ export const WEATHER_FIGURES: readonly Figure[] = [
   },
   {
     id: 'wind-direction', subject: 'weather', name: 'Wind direction', meaning: 'Where the wind blows to, and how straight at something that must not be hit.',
-    equation: 'δ = |((β − to + 540) mod 360) − 180|, to = from + 180', sources: ['spray.md 1.4'], covers: ['weather/wind-direction#blowsTo', 'weather/wind-direction#offAxisDeg', 'weather/wind-direction#meanWind', 'weather/wind-direction#compassPoint'],
+    equation: 'δ = |((β − to + 540) mod 360) − 180|, to = from + 180', sources: ['method notes on spraying, 1.4'], covers: ['weather/wind-direction#blowsTo', 'weather/wind-direction#offAxisDeg', 'weather/wind-direction#meanWind', 'weather/wind-direction#compassPoint'],
     checks: [
       ...([[270, 90, 0], [270, 140, 50], [10, 180, 10], [0, 180, 0]] as const).map(([from, bearing, want]) => check(`from ${from}°, bearing ${bearing}°`, want, () => offAxisDeg(from, bearing), `${SPRAY} 1.4`, 1e-9)),
       check('west wind blows to', 90, () => blowsTo(270), `${SPRAY} 1.4`),
@@ -112,7 +112,7 @@ export const WEATHER_FIGURES: readonly Figure[] = [
   },
   {
     id: 'inversion', subject: 'weather', name: 'Inversion screening', meaning: 'Whether cold air may lie under warm, so that drift travels far. A screening: smoke or two thermometers at the field decide.',
-    equation: 'likely: class F or G, or a night hour with wind under 5 mph and cloud up to 40 %; possible: the hours around it with still air', sources: ['spray.md 2.6, from NDSU AE1705, Missouri 2019 and Turner’s classes; its thresholds are settings'],
+    equation: 'likely: class F or G, or a night hour with wind under 5 mph and cloud up to 40 %; possible: the hours around it with still air', sources: ['method notes on spraying, 2.6, from NDSU AE1705, Missouri 2019 and Turner’s classes; its thresholds are settings'],
     covers: ['weather/inversion#screenInversion'],
     checks: [
       check('Fargo, 15 May 18:30, 4 kt, cloud 10 %', 'possible', () => screenInversion(evening).chance, `${SPRAY} 2.6`),

@@ -23,7 +23,7 @@ describe('the time axis', () => {
 })
 
 describe('safeNext', () => {
-  it.each([['/brindle-marsh/today', '/brindle-marsh/today'], ['//elsewhere.example/today', '/'], ['https://elsewhere.example', '/'], ['javascript:alert(1)', '/'], ['/\\elsewhere.example/today', '/'], [undefined, '/'], [['/a/today'], '/']])('%s leads to %s', (next, expected) => {
+  it.each([['/brindle-marsh/today', '/brindle-marsh/today'], ['/brindle-marsh/figures', '/brindle-marsh/figures'], ['//elsewhere.example/today', '/'], ['https://elsewhere.example', '/'], ['javascript:alert(1)', '/'], ['/\\elsewhere.example/today', '/'], [undefined, '/'], [['/a/today'], '/']])('%s leads to %s', (next, expected) => {
     expect(safeNext(next)).toBe(expected)
   })
 })
