@@ -3,6 +3,7 @@ import { dryCurveNumber, fallowCurveNumber, retentionMm, stormRunoffMm, wetCurve
 import { dryingFactor, totalEvaporableMm } from '../soil/evaporation'
 import { frozenGroundIndex, frozenShare, snowDepthCm } from '../soil/frozen-ground'
 import { hydrologicGroup } from '../soil/hydrologic-group'
+import { chanceOfCall, normalShare, rainWithGauge, withCall, withProbe } from '../soil/learning'
 import { conductivityMmH, soilProperties, waterAtConductivity } from '../soil/properties'
 import { fallsAsSnow, meltableMm } from '../soil/snow'
 import { dampingDepthM, DEPTH_2_IN_M, DEPTH_4_IN_M, DIFFUSIVITY_M2_S, RATE_BARE, soilMeanC, swingLagHours, swingShare } from '../soil/soil-temperature'
@@ -110,5 +111,20 @@ export const SOIL_FIGURES: readonly Figure[] = [
       check(`${name}, best`, best, () => bestTillageWater(CLASS_RETENTION[name]), 'Dexter & Bird eq 6; method notes on soil, 8.3', 5e-5), check(`${name}, wettest`, wettest, () => wettestTillageWater(CLASS_RETENTION[name]), 'Dexter & Bird eq 11; method notes on soil, 8.3', 5e-5),
     ]),
     unknown: FIELD, usualError: '3 % water.', caution: 'Dig and crumble it before you drive.',
+  },
+  {
+    id: 'learning', subject: 'soil', name: 'What a gauge, a probe and a hand teach', meaning: 'A reading moves what is believed of a field by as much as it is surer than the model; a person’s call counts most.',
+    equation: 'w = σp²/(σp² + σg²); P(call) = ε + (1 − 2ε)Φ(∓x/σ)', sources: ['soil.md 11.3 to 11.5; probit moment matching'], covers: ['soil/learning#rainWithGauge', 'soil/learning#withProbe', 'soil/learning#withCall', 'soil/learning#chanceOfCall', 'soil/learning#normalShare'],
+    checks: [
+      check('gauge 12 mm (0.1) on 20 mm (0.5), mm', 12.24, () => rainWithGauge({ value: 20, spread: 0.5 }, { value: 12, spread: 0.1 }).value, 'method notes on soil, 11.3', 0.005), check('its spread', 0.098, () => rainWithGauge({ value: 20, spread: 0.5 }, { value: 12, spread: 0.1 }).spread, 'method notes on soil, 11.3', 5e-4),
+      check('gauge 10.16 (0.15) on 25.4 (0.4), mm', 11.375, () => rainWithGauge({ value: 25.4, spread: 0.4 }, { value: 10.16, spread: 0.15 }).value, 'method notes on soil, 11.3', 5e-4), check('its spread', 0.1404, () => rainWithGauge({ value: 25.4, spread: 0.4 }, { value: 10.16, spread: 0.15 }).spread, 'method notes on soil, 11.3', 5e-5),
+      check('probe 0.37 (0.03) on 0.40 (0.03)', 0.385, () => withProbe({ value: 0.4, spread: 0.03 }, { value: 0.37, spread: 0.03 }).value, 'method notes on soil, 11.5', 1e-9), check('its spread', 0.0212, () => withProbe({ value: 0.4, spread: 0.03 }, { value: 0.37, spread: 0.03 }).spread, 'method notes on soil, 11.5', 5e-5),
+      ...([[0.02, 'not-fit', 0, 0.7105, 0.03202, 0.02427], [0.02, 'fit', 0.05, 0.3106, -0.00474, 0.02511], [-0.02, 'not-fit', 0.05, 0.3106, 0.00474, 0.02511]] as const).flatMap(([value, call, mistakes, chance, moved, spread]) => [
+        check(`over ${value} (0.03), called ${call}, mistakes ${mistakes}: chance`, chance, () => withCall({ value, spread: 0.03 }, call, mistakes).chance, 'method notes on soil, 11.4', 5e-5),
+        check(`over ${value}, called ${call}, mistakes ${mistakes}: then over`, moved, () => withCall({ value, spread: 0.03 }, call, mistakes).value, 'method notes on soil, 11.4', 5e-6), check(`over ${value}, called ${call}, mistakes ${mistakes}: then spread`, spread, () => withCall({ value, spread: 0.03 }, call, mistakes).spread, 'method notes on soil, 11.4', 5e-6),
+      ]),
+      check('a call of fit at the fit level', 0.5, () => chanceOfCall('fit', 0), 'by symmetry', 1e-12), check('Φ(1.96)', 0.975, () => normalShare(1.959963984540054), 'tables of the normal distribution', 1e-9),
+    ],
+    unknown: 'How exactly your own hand calls it, until there are calls to learn from.', usualError: 'One surprising call moves the field by 2.5 % water.',
   },
 ]
