@@ -4,8 +4,9 @@ import { buildWhenNeeded, installWhenNeeded } from './set-up.mjs'
 
 await installWhenNeeded()
 await buildWhenNeeded()
-const { importTypescript } = await import('./run-typescript.mjs')
-for (const name of ['field-hours', 'ground-order', 'page-bytes']) {
-  const { default: bench } = await importTypescript(`tests/bench/${name}.ts`)
+const { importBundled, importTypescript } = await import('./run-typescript.mjs')
+for (const name of ['field-hours', 'particles', 'ground-order', 'page-bytes']) {
+  const own = name === 'field-hours' || name === 'particles'
+  const { default: bench } = await (own ? importBundled : importTypescript)(`tests/bench/${name}.ts`)
   await bench(line => console.log(line))
 }
